@@ -1,0 +1,16 @@
+import { securityHeaders, engineHeaders } from './scripts/build/response-headers.mjs';
+
+/** @type {import('next').NextConfig} */
+const config = {
+  distDir: process.env.HOLDOFF_DIST_DIR || '.next',
+  poweredByHeader: false,
+  reactStrictMode: true,
+  // Native modules and workers that must stay files of their own.
+  serverExternalPackages: ['@node-rs/argon2', 'eecircuit-engine', 'elkjs', 'mysql2', 'pino'],
+  headers: async () => [
+    { source: '/:path*', headers: securityHeaders },
+    { source: '/vendor/:path*', headers: engineHeaders },
+  ],
+};
+
+export default config;

@@ -1,0 +1,34 @@
+import { NextResponse, type NextRequest } from 'next/server';
+import { contentSecurityPolicy } from '@/lib/env/content-security-policy';
+import { environment } from '@/lib/env/environment';
+import { realtimeAddress } from '@/lib/env/realtime-address';
+import { requestId, requestIdHeader } from '@/lib/log/request-id';
+
+/** One year, for every host below PUBLIC_URL's (RFC 6797). */
+const strictTransport = 'max-age=31536000; includeSubDomains';
+
+/** Gives every request an id and every page a nonce, and sets the headers that depend on the request or the environment. */
+export function proxy(request: NextRequest): NextResponse {
+  const env = environment();
+  const nonce = btoa(String.fromCharCode(...crypto.getRandomValues(new Uint8Array(16))));
+  const policy = contentSecurityPolicy({
+    nonce,
+    realtime: realtimeAddress(env, request.headers.get('host')),
+    secure: env.secure,
+    development: env.NODE_ENV === 'development',
+  });
+  const id = requestId(env.TRUST_PROXY > 0 ? request.headers : new Headers());
+  const headers = new Headers(request.headers);
+  headers.set('content-security-policy', policy);
+  headers.set('x-nonce', nonce);
+  headers.set(requestIdHeader, id);
+
+  const response = NextResponse.next({ request: { headers } });
+  response.headers.set('Content-Security-Policy', policy);
+  response.headers.set('X-Request-Id', id);
+  if (env.secure) response.headers.set('Strict-Transport-Security', strictTransport);
+  return response;
+}
+
+/** Everything but built files and the engine, whose headers `next.config.mjs` sets. */
+export const config = { matcher: ['/((?!_next/static|_next/image|vendor/).*)'] };
