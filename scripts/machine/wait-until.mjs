@@ -1,0 +1,19 @@
+/**
+ * Asks again until the answer is true.
+ * @param {() => Promise<boolean> | boolean} condition one that throws counts as false
+ * @param {{ timeoutMs: number, everyMs?: number, signal?: AbortSignal }} options
+ * @returns {Promise<boolean>} false when the time ran out or the signal came
+ */
+export async function waitUntil(condition, { timeoutMs, everyMs = 25, signal }) {
+  const end = Date.now() + timeoutMs;
+  for (;;) {
+    if (signal?.aborted) return false;
+    try {
+      if (await condition()) return true;
+    } catch {
+      // Not yet.
+    }
+    if (Date.now() >= end) return false;
+    await new Promise((resolve) => setTimeout(resolve, everyMs));
+  }
+}
