@@ -25,7 +25,7 @@ export interface FieldDefinition {
   /** Unit of `value`, whose unit depends on the kind. */
   readonly unit?: string;
   /** Offer values of this IEC 60063 series near what was typed. */
-  readonly series?: 'E12' | 'E24' | 'E96';
+  readonly series?: 'E6' | 'E12' | 'E24' | 'E96';
   /** Facts without which the part cannot be examined at all: `value-missing` when absent. */
   readonly required?: boolean;
   /** Ratings that rules ask for: `rating-missing` when absent. */
@@ -39,13 +39,15 @@ export interface FieldDefinition {
 /** Berkeley half: how a part of this kind stands in a deck that people exchange. */
 export interface KindDeck {
   /** Element letter, upper case; null for kinds that leave no element (net names, notes, test points). */
-  readonly letter: string | null;
+  letterOf(part: NetlistPart): string | null;
   /** Element and model lines of one part. `name` is the element name, letter included; `node` maps a net name to a deck node. */
   write(part: NetlistPart, name: string, node: (net: string) => string): readonly string[];
-  /** Takes an element that no `kind=` fact claims for another kind; null when it is not of this kind. */
+  /** Takes an element that no fact line claims for another kind. `modelType` is nmos or pmos for a VDMOS card too. */
   read?(element: DeckElement, modelType: string | undefined): boolean;
-  /** Pin name for each node position of the element. */
+  /** Pin name for each node position of the element; a name that is no pin of the kind (`B`, `S` of a transistor) is left out of the part. */
   readonly pinOrder: readonly string[];
+  /** What the element carries where nobody gave a value. Only kinds whose `facts.value` is the element's number have it. */
+  readonly placeholder?: number;
 }
 
 /** All halves of one kind of part. A missing half fails the type check. */
@@ -60,6 +62,8 @@ export interface Kind {
   /** Facts of a freshly placed part; every one of them counts as assumed unless the kind says otherwise. */
   readonly defaults: Readonly<Partial<Record<FactKey, number | string | boolean>>>;
   readonly symbol: SymbolArt;
+  /** Other drawings of the same kind with the same pins. */
+  readonly alternatives?: readonly SymbolArt[];
   readonly deck: KindDeck;
   readonly engine: KindEngine;
   /** The one or two lines printed beside the symbol, in fact keys, first to last (`['value', 'pmax']`). */

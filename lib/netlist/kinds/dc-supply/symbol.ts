@@ -1,0 +1,13 @@
+import type { SymbolArt } from '../symbol-art';
+
+export const dcSupplySymbol: SymbolArt = {
+  id: 'vcl',
+  shapes: [
+    { shape: 'path', style: 's', d: 'M0 -30V-16M0 16V30' },
+    { shape: 'circle', style: 'b', cx: 0, cy: 0, r: 16 },
+    { shape: 'path', style: 's', d: 'M-8.5 -6H3.5V8' },
+    { shape: 'path', style: 's', d: 'M7 -22h6M10 -25v6' },
+    { shape: 'path', style: 's', d: 'M7 22h6' },
+  ],
+  box: [-16, -30, 16, 30],
+};

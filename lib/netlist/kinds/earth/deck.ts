@@ -1,0 +1,3 @@
+import { markDeck } from '../element-line';
+
+export const earthDeck = markDeck;

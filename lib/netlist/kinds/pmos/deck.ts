@@ -1,0 +1,3 @@
+import { mosfetDeck } from '../exchange-mosfet';
+
+export const pmosDeck = mosfetDeck('pmos');

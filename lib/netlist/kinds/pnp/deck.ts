@@ -1,0 +1,3 @@
+import { bipolarDeck } from '../exchange-bipolar';
+
+export const pnpDeck = bipolarDeck('pnp');

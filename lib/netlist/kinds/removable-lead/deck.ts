@@ -1,0 +1,3 @@
+import { contactDeck } from '../element-line';
+
+export const removableLeadDeck = contactDeck(() => true);
