@@ -1,0 +1,45 @@
+/** What a margin entry is tied to. Parts by record id or by designator, nets by name, spots in sheet units. */
+export type MarginAnchor =
+  | { readonly kind: 'part'; readonly id: string }
+  | { readonly kind: 'ref'; readonly ref: string }
+  | { readonly kind: 'net'; readonly name: string }
+  | { readonly kind: 'spot'; readonly x: number; readonly y: number };
+
+/** CSS pixels from the left top of the canvas element. */
+export interface Place {
+  readonly x: number;
+  readonly y: number;
+}
+
+export interface Box {
+  readonly left: number;
+  readonly top: number;
+  readonly right: number;
+  readonly bottom: number;
+}
+
+export interface SheetTarget {
+  /** Where a leader may end, the best first: pins or edges of a symbol, points of a wire. Never empty. */
+  readonly ends: readonly Place[];
+  /** Zone of the sheet's frame, 'B5'. */
+  readonly zone: string;
+  /** How the target is called: 'R1', 'net GATE', 'B5'. */
+  readonly words: string;
+}
+
+/**
+ * What the margin asks of a sheet canvas. The canvas makes one of these and keeps it for its life; every answer is about
+ * the picture on the screen now.
+ */
+export interface SheetGeometry {
+  /** Null when the anchor is not on the sheet any more. Places outside the visible canvas are given as they are. */
+  targetOf(anchor: MarginAnchor): SheetTarget | null;
+  /** Boxes of texts that a leader must not cross. */
+  texts(): readonly Box[];
+  /** Visible size of the canvas. */
+  size(): { readonly width: number; readonly height: number };
+  /** Called after each frame that moved something: pan, zoom, drag, edit, resize. Returns how to stop. */
+  subscribe(listener: () => void): () => void;
+  /** Brings what is anchored into view. */
+  reveal(anchor: MarginAnchor): void;
+}
