@@ -1,7 +1,8 @@
 import { spawn } from 'node:child_process';
+import { interruption } from './interruption.mjs';
 
 /**
- * Runs a program to its end.
+ * Runs a program to its end; it is ended when this process is told to end.
  * @param {string} command
  * @param {readonly string[]} args
  * @param {import('node:child_process').SpawnOptions & { quiet?: boolean }} [options] `quiet` keeps its output for the error only
@@ -9,7 +10,7 @@ import { spawn } from 'node:child_process';
  */
 export function runCommand(command, args, { quiet = false, ...options } = {}) {
   return new Promise((resolve, reject) => {
-    const child = spawn(command, args, { stdio: quiet ? ['ignore', 'pipe', 'pipe'] : ['ignore', 'inherit', 'inherit'], ...options });
+    const child = spawn(command, args, { stdio: quiet ? ['ignore', 'pipe', 'pipe'] : ['ignore', 'inherit', 'inherit'], signal: interruption.signal, ...options });
     let output = '';
     let everything = '';
     child.stdout?.on('data', (bytes) => { output += bytes; everything += bytes; });
