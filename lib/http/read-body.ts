@@ -1,0 +1,51 @@
+import type { z } from 'zod';
+import { Problem } from '@/lib/errors/problem';
+
+const jsonType = /^application\/json(?:\s*;.*)?$/i;
+
+/**
+ * The body as `schema` has it. Only `application/json` is taken (415), at most `limit` bytes (413, counted while reading);
+ * a body that may be left out (`DELETE`) counts as `{}` when it is empty.
+ */
+export async function readBody<S extends z.ZodType>(request: Request, schema: S, limit: number): Promise<z.output<S>> {
+  const bytes = await readLimited(request, limit);
+  if (bytes.length === 0 && request.method === 'DELETE') return validated(schema, {});
+  if (!jsonType.test(request.headers.get('content-type') ?? '')) throw new Problem('content-type');
+  return validated(schema, parseJson(bytes));
+}
+
+async function readLimited(request: Request, limit: number): Promise<Uint8Array> {
+  const tooLarge = () => new Problem('too-large', `At most ${Math.floor(limit / 1024)} KiB are taken here.`);
+  if (Number(request.headers.get('content-length') ?? 0) > limit) throw tooLarge();
+  const chunks: Uint8Array[] = [];
+  let size = 0;
+  const reader = request.body?.getReader();
+  while (reader) {
+    const { done, value } = await reader.read();
+    if (done) break;
+    size += value.length;
+    if (size > limit) {
+      await reader.cancel();
+      throw tooLarge();
+    }
+    chunks.push(value);
+  }
+  return Buffer.concat(chunks, size);
+}
+
+function parseJson(bytes: Uint8Array): unknown {
+  try {
+    return JSON.parse(new TextDecoder('utf-8', { fatal: true }).decode(bytes));
+  } catch {
+    throw new Problem('input-wrong', 'The body is not JSON in UTF-8.');
+  }
+}
+
+/** `value` as `schema` has it, or 422 with every wrong field. */
+export function validated<S extends z.ZodType>(schema: S, value: unknown): z.output<S> {
+  const parsed = schema.safeParse(value);
+  if (parsed.success) return parsed.data;
+  const errors = parsed.error.issues.slice(0, 20).map((issue) => ({ path: issue.path.join('.'), message: issue.message }));
+  const first = errors[0];
+  throw new Problem('input-wrong', first && (first.path === '' ? first.message : `${first.path}: ${first.message}`), { errors });
+}
