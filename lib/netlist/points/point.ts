@@ -18,6 +18,10 @@ export interface PointKey {
   readonly level: Level;
   readonly state: DriveState;
   readonly corner: Corner;
+  /** Designator of the control that is high, where a circuit has several; the others are low. */
+  readonly control?: string;
+  /** Computed with every supply's current limit lifted, because it was active at the same point. */
+  readonly limitLifted?: boolean;
 }
 
 /** Why a point has no numbers. */
