@@ -8,7 +8,7 @@ import path from 'node:path';
  * @param {string} folder where the `.mjs` files go
  */
 export async function bundlePrograms(root, folder) {
-  const { build } = await import('esbuild');
+  const { build, stop } = await import('esbuild');
   const programs = readdirSync(path.join(root, 'scripts/programs')).filter((name) => name.endsWith('.ts') && !name.endsWith('.test.ts'));
   await build({
     absWorkingDir: root,
@@ -26,4 +26,6 @@ export async function bundlePrograms(root, folder) {
     sourcemap: 'linked',
     logLevel: 'warning',
   });
+  // Its helper process would stay for as long as this one.
+  await stop();
 }
