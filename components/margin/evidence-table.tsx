@@ -1,10 +1,8 @@
+import { formatQuantity } from '@/lib/netlist/quantity/format-quantity';
 import type { Evidence } from '@/lib/netlist/findings/finding';
 
 function valueWords(value: Evidence['value'], unit: string): string {
-  if (typeof value !== 'number') return String(value);
-  const size = Math.abs(value);
-  const [factor, prefix] = unit === '' || size === 0 ? [1, ''] : size >= 1e6 ? [1e-6, 'M'] : size >= 1e3 ? [1e-3, 'k'] : size >= 1 ? [1, ''] : size >= 1e-3 ? [1e3, 'm'] : size >= 1e-6 ? [1e6, 'µ'] : [1e9, 'n'];
-  return `${Number((value * factor).toPrecision(3))}${unit ? `\u2009${prefix}${unit}` : ''}`;
+  return typeof value === 'number' ? formatQuantity(value, unit, 3) : String(value);
 }
 
 /** The facts a verdict rests on: from these alone it can be computed again. */

@@ -11,8 +11,8 @@ import { ThreadMessages } from './thread-messages';
 
 interface NoteEntryViewProps extends EntryViewProps {
   readonly entry: NoteEntry;
-  /** What the note is on: 'R1', 'net GATE'; null when that is gone. */
-  readonly target: string | null;
+  /** What the note is on: 'R1', 'net GATE'; null when that is gone, undefined while the sheet is not there to ask. */
+  readonly target: string | null | undefined;
 }
 
 export function NoteEntryView({ entry, target, selected, folded, locator, onSelect }: NoteEntryViewProps) {
@@ -28,7 +28,7 @@ export function NoteEntryView({ entry, target, selected, folded, locator, onSele
       <EntryHead
         kind="note"
         mark={<Mark kind="note" label={initials} silent />}
-        words={`${shortName(thread.by.name)} on ${target ?? 'a part that is gone'}`}
+        words={target === undefined ? shortName(thread.by.name) : `${shortName(thread.by.name)} on ${target ?? 'a part that is gone'}`}
         folded={folded && !selected ? first?.body : undefined}
         pills={pill}
         right={<Moment at={thread.at} />}
