@@ -5,7 +5,7 @@ import { isAlive } from '../machine/processes.mjs';
 const userFile = /^in-use-(\d+)$/;
 
 /** Notes that this process serves from a build, so that a later build does not remove it. @param {string} root @param {string} build @returns {() => void} ends it */
-export function useBuild(root, build) {
+export function serveFrom(root, build) {
   const file = path.join(root, build, `in-use-${process.pid}`);
   writeFileSync(file, '');
   return () => rmSync(file, { force: true });
