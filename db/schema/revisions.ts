@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm';
-import { bigint, double, index, int, mysqlTable, primaryKey, text, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
+import { bigint, boolean, double, index, int, mysqlTable, primaryKey, text, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
 import { z } from 'zod';
 import { findingSchema } from '@/lib/netlist/findings/finding';
 import { netlistSchema } from '@/lib/schemas/netlist';
@@ -28,8 +28,6 @@ export const revisions = mysqlTable('revisions', {
   cutAt: moment('cut_at').notNull(),
   /** Rule versions and parameters in force at the cut. */
   rules: jsonColumn('rules', z.record(z.string(), z.object({ version: z.number(), parameters: z.record(z.string(), z.number()) }))).notNull(),
-  /** 'hold point / state' pairs that the lifted-lead check was run at; empty where there is no lead to lift. */
-  liftedRuns: jsonColumn('lifted_runs', strings).notNull(),
   askedAt: moment('asked_at'),
   askedBy: ulidColumn('asked_by').references(() => people.id),
 }, (table) => [
@@ -68,6 +66,8 @@ export const revisionHoldPoints = mysqlTable('revision_hold_points', {
   source: exactText('source', { length: 40 }),
   volts: double('volts').notNull(),
   amps: double('amps').notNull(),
+  /** False when the plan does not say which source it raises: such a hold point cannot be signed. */
+  sourceKnown: boolean('source_known').notNull(),
 }, (table) => [primaryKey({ columns: [table.revisionId, table.position] }), uniqueIndex('revision_hold_points_name').on(table.revisionId, table.name)]);
 
 /** Who made an electrical change before the cut, every maker past or present, whoever brought a deck: they may not sign. */
@@ -84,6 +84,7 @@ export const findings = mysqlTable('findings', {
   rule: varchar('rule', { length: 60 }).notNull(),
   outcome: varchar('outcome', { length: 20 }).notNull(),
   severity: varchar('severity', { length: 10 }).notNull(),
+  refs: jsonColumn('refs', strings).notNull(),
   fromVolts: double('from_volts'),
   /** The finding as every call answers it. */
   finding: jsonColumn('finding', findingSchema).notNull(),

@@ -22,6 +22,7 @@ export const codes = {
   objection: { status: 409, title: 'Changes are asked for.', advice: 'Whoever asked lifts it, or a steward overrides it with a reason.' },
   'must-answer': { status: 409, title: 'A note that must be answered is open.', advice: 'Answer it and have it resolved.' },
   'rule-error': { status: 409, title: 'A check did not finish.', advice: 'Cut the revision again; a check in error never counts as passed.' },
+  'which-source': { status: 409, title: 'The plan does not say which source this hold point raises.', advice: 'Name the source in the plan and cut a new revision.' },
   'already-signed': { status: 409, title: 'This hold point has just been signed off by someone else.', advice: 'Reload the revision.' },
   'already-withdrawn': { status: 409, title: 'This sign-off was already withdrawn.', advice: 'Reload the revision.' },
   'already-lifted': { status: 409, title: 'This request for changes is no longer in force.', advice: 'Reload the revision.' },
