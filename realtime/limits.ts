@@ -19,6 +19,8 @@ export const limits = {
   presenceBytes: 2 * kib,
   presencePerSecond: 10,
   needPerSecond: 4,
+  /** A copy further behind than this gets the whole sheet instead of rows. */
+  needRows: 500,
   pingEvery: 20_000,
   pingMisses: 3,
   /** Unanswered edits a connection may have with the server. */
