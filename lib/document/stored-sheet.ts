@@ -1,4 +1,4 @@
-import type * as Y from 'yjs';
+import * as Y from 'yjs';
 
 /** Layout version of the stored sheet; raised with every migration. */
 export const schemaVersion = 1;
@@ -43,3 +43,6 @@ export function metaOf(doc: Y.Doc): Y.Map<FlatValue> {
 export function sharedTypesOf(doc: Y.Doc): (Y.Map<RecordMap> | Y.Map<FlatValue>)[] {
   return [...collectionNames.map((name) => collectionOf(doc, name)), libraryOf(doc), metaOf(doc)];
 }
+
+/** A stored record ready to be put into its collection. */
+export const recordMapOf = (flat: FlatRecord): RecordMap => new Y.Map(Object.entries(flat));

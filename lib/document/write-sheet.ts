@@ -1,7 +1,7 @@
-import * as Y from 'yjs';
+import type * as Y from 'yjs';
 import { codecs } from './codecs/codec-table';
 import type { Sheet } from './records';
-import { collectionNames, collectionOf, libraryOf, metaOf, schemaVersion, type CollectionName, type FlatRecord, type FlatValue } from './stored-sheet';
+import { collectionNames, collectionOf, libraryOf, metaOf, recordMapOf, schemaVersion, type CollectionName, type FlatRecord, type FlatValue } from './stored-sheet';
 
 /** Sheet of a circuit that nobody has drawn on yet. */
 export const emptySheet: Sheet = {
@@ -34,7 +34,7 @@ function writeCollection(doc: Y.Doc, name: CollectionName, before: readonly Iden
     if (was === record) continue;
     const map = stored.get(record.id);
     if (was && map) writeKeys(map, toFlat(was), toFlat(record));
-    else stored.set(record.id, new Y.Map(Object.entries(toFlat(record))));
+    else stored.set(record.id, recordMapOf(toFlat(record)));
   }
   for (const id of old.keys()) stored.delete(id);
 }

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import * as Y from 'yjs';
 import { decodeDocument, encodeDocument, encodeSheet } from '../encode-sheet';
-import { collectionOf } from '../stored-sheet';
+import { collectionOf, recordMapOf } from '../stored-sheet';
 import { gateStage } from '../testing/gate-stage';
 import { admitUpdate } from './admit-update';
 import { updateBytesLimit } from './sheet-limits';
@@ -63,7 +63,7 @@ describe('admission of one update', () => {
     expect(refusal(edit((doc) => collectionOf(doc, 'parts').get('R1')?.set('fact:note', 'x'.repeat(70_000))))).toBe('size');
     expect(refusal(edit((doc) => {
       for (let index = 0; index < 60; index += 1) {
-        collectionOf(doc, 'scenarios').set(`s${index}`, new Y.Map(Object.entries({ name: `${index}`, ambient: 25 })));
+        collectionOf(doc, 'scenarios').set(`s${index}`, recordMapOf({ name: `${index}`, ambient: 25 }));
       }
     }))).toBe('size');
   });

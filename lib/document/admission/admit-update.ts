@@ -1,8 +1,8 @@
 import * as Y from 'yjs';
-import { libraryLimit, recordLimits, updateBytesLimit } from './sheet-limits';
-import { changedRecordsOf, problemOfRecord } from './changed-records';
 import { readLibrary } from '../repair/repair-library';
 import { collectionNames, collectionOf, libraryOf, metaOf, schemaVersion, sharedTypesOf, type FlatRecord } from '../stored-sheet';
+import { changedRecordsOf, problemOfRecord } from './changed-records';
+import { libraryLimit, recordLimits, updateBytesLimit } from './sheet-limits';
 
 /** Why an edit is not taken. The names are those of the room's refusal frames. */
 export type RefusalReason = 'undecodable' | 'gap' | 'schema' | 'size';
@@ -64,7 +64,7 @@ function problemOf(doc: Y.Doc, transaction: Y.Transaction): { readonly reason: R
   if (title !== undefined && (typeof title !== 'string' || title.length > 120)) return { reason: 'schema', words: 'The title is one line of at most 120 characters.' };
   const library = libraryOf(doc);
   if (library.size > libraryLimit) return { reason: 'size', words: `A sheet takes at most ${libraryLimit} models.` };
-  if (transaction.changed.has(library as unknown as Y.AbstractType<Y.YEvent<never>>)) {
+  if ([...transaction.changed.keys()].some((type) => (type as unknown) === library)) {
     const unreadable = readLibrary(library.toJSON() as FlatRecord).repairs[0];
     if (unreadable) return { reason: 'schema', words: `${unreadable.id} is no model.` };
   }

@@ -1,5 +1,5 @@
 import type { JunctionRecord, PartRecord, Sheet, WireEnd, WireRecord } from '../records';
-import { pinPlaceOf } from './pin-place';
+import { pinPlaceOf, pinPlacesOf } from './pin-place';
 import type { Point } from './point';
 
 /** Look-ups into one sheet. Sheets are immutable, so one index serves every reader of the same sheet. */
@@ -35,9 +35,11 @@ export function indexOf(sheet: Sheet): SheetIndex {
   return index;
 }
 
-/** Where a wire's end stands, with the way it leaves a pin; undefined when the end is missing. */
+/** Where a wire's end stands, with the way it leaves a pin (a mark with one pin has none); undefined when the end is missing. */
 export function endPlace(index: SheetIndex, end: WireEnd): (Point & { readonly out?: Point }) | undefined {
   if (end.at === 'junction') return index.junction.get(end.junction);
   const part = index.part.get(end.part);
-  return part ? pinPlaceOf(part, end.pin) : undefined;
+  if (!part) return undefined;
+  const place = pinPlaceOf(part, end.pin);
+  return place && pinPlacesOf(part).length === 1 ? { x: place.x, y: place.y } : place;
 }

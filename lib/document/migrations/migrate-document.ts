@@ -1,10 +1,10 @@
-import * as Y from 'yjs';
+import type * as Y from 'yjs';
 import { flatOf } from '../sheet-reader';
 import {
-  collectionNames, collectionOf, libraryOf, metaOf, type CollectionName, type FlatRecord, type FlatValue, type StoredSheet,
+  collectionNames, collectionOf, libraryOf, metaOf, recordMapOf, schemaVersion, type CollectionName, type FlatRecord, type FlatValue, type StoredSheet,
 } from '../stored-sheet';
 import { migrate } from './migrate';
-import type { Migration } from './migration';
+import { migrations, type Migration } from './migration';
 
 /** The document as plain stored data. */
 export function storedSheetOf(doc: Y.Doc): StoredSheet {
@@ -16,7 +16,9 @@ export function storedSheetOf(doc: Y.Doc): StoredSheet {
 }
 
 /** Brings a document to layout `target` in one transaction; writes only what the steps changed. True when it changed. */
-export function migrateDocument(doc: Y.Doc, target: number, steps: readonly Migration[], origin?: unknown): boolean {
+export function migrateDocument(
+  doc: Y.Doc, target: number = schemaVersion, steps: readonly Migration[] = migrations, origin?: unknown,
+): boolean {
   const before = storedSheetOf(doc);
   const after = migrate(before, target, steps);
   if (after === before) return false;
@@ -34,7 +36,7 @@ function writeRecords(
   for (const [id, flat] of Object.entries(after)) {
     const map = stored.get(id);
     if (map && before[id]) writeFlat(map, before[id], flat);
-    else stored.set(id, new Y.Map(Object.entries(flat)));
+    else stored.set(id, recordMapOf(flat));
   }
   for (const id of Object.keys(before)) if (!(id in after)) stored.delete(id);
 }
