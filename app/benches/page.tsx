@@ -6,7 +6,7 @@ import { ThemeToggle } from '@/components/shell/theme-toggle';
 import { TopBar } from '@/components/shell/top-bar';
 import { StateBox } from '@/components/ui/state-box';
 import { database } from '@/db/client';
-import { benchesOf } from '@/db/queries/people';
+import { ownBenches } from '@/db/queries/people';
 import { pagePerson } from '@/lib/http/page-caller';
 
 export const metadata: Metadata = { title: 'Your benches' };
@@ -14,7 +14,7 @@ export const metadata: Metadata = { title: 'Your benches' };
 /** Whoever has one bench goes straight to it. */
 export default async function BenchesPage() {
   const { person } = await pagePerson('/benches');
-  const benches = await benchesOf(database(), person.id);
+  const benches = await ownBenches(database(), person.id);
   if (benches.length === 1 && benches[0]) redirect(`/benches/${benches[0].slug}`);
   return (
     <div className="flex min-h-full flex-col">
