@@ -14,6 +14,7 @@ export const browserPart = {
     try {
       const code = await runTool([path.join(root, 'node_modules/@playwright/test/cli.js'), 'test'], {
         root,
+        scratch,
         env: {
           E2E_ADDRESS: product.address, E2E_ACCOUNTS: JSON.stringify(product.accounts), E2E_DATA_DIR: product.dataFolder, PLAYWRIGHT_JSON_OUTPUT_FILE: report,
         },

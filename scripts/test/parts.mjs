@@ -14,14 +14,14 @@ const database = { mariadbd: 'mariadb-server' };
 export const testParts = [
   {
     name: 'lint',
-    run: async ({ root }) => oneCheck((await runTool([inPackages(root, 'eslint/bin/eslint.js'), '.', '--max-warnings', '0'], { root })) === 0),
+    run: async ({ root, scratch }) => oneCheck((await runTool([inPackages(root, 'eslint/bin/eslint.js'), '.', '--max-warnings', '0'], { root, scratch })) === 0),
   },
   {
     name: 'types',
-    run: async ({ root }) => {
+    run: async ({ root, scratch }) => {
       // Route types are made from the routes there are; a deleted one would otherwise haunt the check.
-      const generated = await runTool([inPackages(root, 'next/dist/bin/next'), 'typegen', root], { root });
-      return oneCheck(generated === 0 && (await runTool([inPackages(root, 'typescript/bin/tsc'), '--noEmit'], { root })) === 0);
+      const generated = await runTool([inPackages(root, 'next/dist/bin/next'), 'typegen', root], { root, scratch });
+      return oneCheck(generated === 0 && (await runTool([inPackages(root, 'typescript/bin/tsc'), '--noEmit'], { root, scratch })) === 0);
     },
   },
   vitest('repo'),
@@ -30,6 +30,7 @@ export const testParts = [
   vitest('integration', database),
   vitest('access', database),
   vitest('realtime', database),
+  vitest('lifecycle', database),
   browserPart,
 ];
 
@@ -40,7 +41,7 @@ function vitest(name, needs) {
     run: async ({ root, scratch }) => {
       const report = path.join(scratch, `${name}.json`);
       const args = [inPackages(root, 'vitest/vitest.mjs'), 'run', '--project', name, '--reporter=default', '--reporter=json', `--outputFile.json=${report}`];
-      return tallyFrom(report, await runTool(args, { root, env: { HOLDOFF_SCRATCH: scratch } }), vitestTally);
+      return tallyFrom(report, await runTool(args, { root, scratch }), vitestTally);
     },
   };
 }

@@ -31,7 +31,9 @@ export async function startProduct({ root, dataFolder, env = {} }) {
     address: /ready at (\S+)/.exec(output)?.[1] ?? '',
     accounts: [...output.matchAll(accountLine)].map(([, email = '', password = '', part = '']) => ({ email, password, part })),
     dataFolder,
-    pid: child.pid,
+    pid: child.pid ?? 0,
+    /** @param {NodeJS.Signals} signal */
+    signal: (signal) => child.kill(signal),
     output: () => output,
     exited,
     stop,
