@@ -1,4 +1,4 @@
-import { and, eq, gt, isNull } from 'drizzle-orm';
+import { and, eq, gt, isNull, sql } from 'drizzle-orm';
 import type { Executor } from '../client';
 import { circuitMakers, circuits, guestLinks } from '../schema/circuits';
 import { memberships, people, sessions } from '../schema/people';
@@ -31,26 +31,34 @@ export async function readRoomGrant(
     : readPersonGrant(db, roomId, actor.personId, actor.sessionId, now, lock);
 }
 
+interface PersonGrantRow {
+  readonly role: 'member' | 'mentor' | 'steward';
+  readonly membership: number;
+  readonly archived: number;
+  readonly maker: number;
+  readonly session: string | null;
+  readonly name: string;
+}
+
 async function readPersonGrant(
   db: Executor, roomId: string, personId: string, sessionId: string | null, now: Date, lock: boolean,
 ): Promise<RoomGrant | undefined> {
-  const query = db.select({
-    role: memberships.role, membership: memberships.version, archivedAt: circuits.archivedAt, postedBy: circuits.postedBy,
-    makerId: circuitMakers.id, session: sessions.id, name: people.name,
-  }).from(circuits)
-    .innerJoin(people, eq(people.id, personId))
-    .innerJoin(memberships, and(eq(memberships.benchId, circuits.benchId), eq(memberships.personId, personId)))
-    .leftJoin(circuitMakers, and(
-      eq(circuitMakers.circuitId, circuits.id), eq(circuitMakers.personId, personId), eq(circuitMakers.standing, 1),
-    ))
-    .leftJoin(sessions, and(
-      eq(sessions.id, sessionId ?? ''), eq(sessions.userId, personId), gt(sessions.expiresAt, now), gt(sessions.endsAt, now),
-    ))
-    .where(eq(circuits.id, roomId));
-  const [row] = await (lock ? query.for('share') : query);
+  // Drizzle writes `for share`, which MariaDB does not know.
+  const [rows] = await db.execute(sql`select ${memberships.role} as role, ${memberships.version} as membership,
+      ${circuits.archivedAt} is not null as archived, ${people.name} as name, ${sessions.id} as session,
+      (${circuitMakers.id} is not null or ${circuits.postedBy} = ${people.id}) as maker
+    from ${circuits}
+    join ${people} on ${people.id} = ${personId}
+    join ${memberships} on ${memberships.benchId} = ${circuits.benchId} and ${memberships.personId} = ${people.id}
+    left join ${circuitMakers} on ${circuitMakers.circuitId} = ${circuits.id} and ${circuitMakers.personId} = ${people.id}
+      and ${circuitMakers.standing} = 1
+    left join ${sessions} on ${sessions.id} = ${sessionId} and ${sessions.userId} = ${people.id}
+      and ${sessions.expiresAt} > ${now} and ${sessions.endsAt} > ${now}
+    where ${circuits.id} = ${roomId} ${lock ? sql`lock in share mode` : sql``}`) as unknown as [PersonGrantRow[]];
+  const row = rows[0];
   if (!row || (sessionId !== null && row.session === null)) return undefined;
-  const maker = row.makerId !== null || row.postedBy === personId;
-  const archived = row.archivedAt !== null;
+  const maker = Number(row.maker) === 1;
+  const archived = Number(row.archived) === 1;
   return {
     benchRole: row.role, maker, archived, name: row.name,
     version: `${row.role}.${row.membership}.${maker ? 'maker' : '-'}.${archived ? 'archived' : '-'}`,
