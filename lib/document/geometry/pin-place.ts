@@ -11,14 +11,11 @@ export interface PinPlace extends Point {
   readonly out: Point;
 }
 
-/** Which way a wire leaves a pin: the side of the symbol's outline nearest to it. */
+/** Which way a wire leaves a pin: the side of the symbol's outline nearest to it; at a corner the side that is farther from the origin. */
 function outward(pin: Point, box: Box): Point {
-  const sides: readonly (readonly [number, Point])[] = [
-    [pin.x - box.left, { x: -1, y: 0 }],
-    [box.right - pin.x, { x: 1, y: 0 }],
-    [pin.y - box.top, { x: 0, y: -1 }],
-    [box.bottom - pin.y, { x: 0, y: 1 }],
-  ];
+  const level: readonly (readonly [number, Point])[] = [[pin.x - box.left, { x: -1, y: 0 }], [box.right - pin.x, { x: 1, y: 0 }]];
+  const upright: readonly (readonly [number, Point])[] = [[pin.y - box.top, { x: 0, y: -1 }], [box.bottom - pin.y, { x: 0, y: 1 }]];
+  const sides = Math.abs(pin.y) > Math.abs(pin.x) ? [...upright, ...level] : [...level, ...upright];
   return sides.reduce((best, side) => (side[0] < best[0] ? side : best))[1];
 }
 
