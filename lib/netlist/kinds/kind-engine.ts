@@ -1,4 +1,4 @@
-import type { ModelCard, NetlistPart } from '../netlist';
+import type { ModelCard, NetlistPart, Subcircuit } from '../netlist';
 
 /** How a conducting edge between two pins counts in the topological checks before a run (`docs/engine.md` 3.6). */
 export type EdgeStiffness =
@@ -9,8 +9,12 @@ export type EdgeStiffness =
   /** Joins for islands only: capacitor, current source, gate. */
   | 'none';
 
+/** Stands in an edge for the 0 V net where a run ties a pin to it. */
+export const groundEnd = '#0';
+
 export interface KindEdge {
   readonly from: string;
+  /** A pin, or `groundEnd`. */
   readonly to: string;
   readonly stiffness: EdgeStiffness;
   /** Sets a voltage by itself (V source, inductor at DC): two of them closing a ring is a source loop. */
@@ -42,6 +46,8 @@ export interface EngineContext {
   /** A generated node private to this part (`n7` style), the same for the same key. */
   innerNode(key: string): string;
   readonly card: ModelCard | undefined;
+  /** What the part's `model` may name besides its own card. */
+  readonly library: { readonly models: readonly ModelCard[]; readonly subcircuits: readonly Subcircuit[] };
 }
 
 /** Current into a pin, amps: a raw-file vector and its sign, or the sum of several. */

@@ -1,0 +1,140 @@
+import { limitOf } from '../kinds/engine-source';
+import type { Corner, CurrentProbe, EngineElements } from '../kinds/kind-engine';
+import { kindOf } from '../kinds/kind-registry';
+import { pinReference } from '../connectivity/pin-reference';
+import { engineNumber } from '../models/model-line';
+import type { Netlist, NetlistPart } from '../netlist';
+import type { OperatingPoint, Refusal } from '../points/point';
+import { precheck, type ControlPin } from '../precheck/precheck';
+import { effectiveParts, type PartSettings } from './effective-part';
+import { EngineNames } from './engine-names';
+import type { PointRequest } from './engine-port';
+import { leakageLine } from './gate-leakage';
+import { runnableParts } from './runnable-parts';
+
+export interface DeckOptions {
+  readonly settings: PartSettings;
+  readonly corner: Corner;
+  /** °C; 25 for models from ratings, 27 where a part brought a card of its own, unless given. */
+  readonly ambient?: number;
+  /** Adds the gate leakage of every transistor, into the gate (1) or out of it (-1). */
+  readonly gateLeakage?: 1 | -1;
+}
+
+export interface EngineDeck {
+  readonly request: PointRequest;
+  decode(values: Readonly<Record<string, number>>): OperatingPoint;
+  readonly names: EngineNames;
+  readonly assumed: readonly { readonly part: string; readonly fact: string; readonly words: string }[];
+  /** Gates and bases whose drive is for a run with leakage to decide. */
+  readonly weakControls: readonly ControlPin[];
+}
+
+/** A supply counts as limited from this part of its limit on (docs/engine.md 3.5). */
+const limitedFrom = 0.999;
+const sheetTemperature = 25;
+const cardTemperature = 27;
+/** ngspice reads long lines badly; a `.save` line holds this many vectors. */
+const savedPerLine = 20;
+
+interface PlacedPart {
+  readonly part: NetlistPart;
+  readonly elements: EngineElements;
+}
+
+/**
+ * The deck of one operating point, or why there is none. Nets without a DC path to 0 V are left out with the parts on
+ * them and have no volts; a floating gate, a ring of sources and a missing fact leave no run.
+ */
+export function buildEngineDeck(netlist: Netlist, options: DeckOptions): EngineDeck | Refusal {
+  const parts = effectiveParts(netlist, options.settings);
+  const checked = precheck(parts);
+  const runnable = runnableParts(parts, checked);
+  if ('code' in runnable) return runnable;
+
+  const names = new EngineNames();
+  const ambient = options.ambient ?? (runnable.some(({ model }) => model !== undefined) ? cardTemperature : sheetTemperature);
+  const placed: PlacedPart[] = [];
+  for (const [index, part] of runnable.entries()) {
+    const elements = elementsOf(part, `p${index + 1}`, netlist, options, ambient, names);
+    if ('missing' in elements) return missingFact(part, elements.missing);
+    placed.push({ part, elements });
+  }
+
+  const liveNets = netlist.nets.map(({ name }) => name).filter((net) => net !== '0' && checked.liveNets.has(net));
+  const vectors = [
+    ...liveNets.map((net) => `v(${names.node(net)})`),
+    ...new Set(placed.flatMap(({ elements }) => Object.values(elements.currents).flat().map(({ vector }) => vector))),
+  ];
+  const leakage = options.gateLeakage;
+  return {
+    names,
+    assumed: placed.flatMap(({ part, elements }) => elements.assumed.map((entry) => ({ part: part.ref, ...entry }))),
+    weakControls: checked.weakControls.filter(({ part }) => runnable.includes(part)),
+    request: {
+      analysis: 'op',
+      vectors,
+      lines: [
+        `.options temp=${engineNumber(ambient)} tnom=${sheetTemperature}`,
+        ...placed.flatMap(({ elements }) => elements.lines),
+        ...(leakage === undefined ? [] : placed.flatMap(({ part }, index) => leakageLine(part, `p${index + 1}`, leakage, names))),
+        ...saveLines(vectors),
+        '.op',
+      ],
+    },
+    decode: (values) => decode(values, liveNets, placed, parts, names),
+  };
+}
+
+function elementsOf(
+  part: NetlistPart, name: string, netlist: Netlist, options: DeckOptions, ambient: number, names: EngineNames,
+): EngineElements | { readonly missing: string } {
+  return kindOf(part.kind).engine.elements(part, {
+    corner: options.corner,
+    ambient,
+    setting: options.settings[part.id] ?? {},
+    name,
+    node: (pin) => names.node(part.pins[pin] ?? '0'),
+    innerNode: (key) => names.node(`${name} ${key}`, `inside ${part.ref}`),
+    card: netlist.models.find((card) => card.name.toLowerCase() === part.model?.toLowerCase()),
+    library: netlist,
+  });
+}
+
+function missingFact(part: NetlistPart, fact: string): Refusal {
+  return { code: 'missing-fact', words: `${part.ref} ${fact}`, nodes: [], parts: [part.ref] };
+}
+
+function saveLines(vectors: readonly string[]): readonly string[] {
+  const saved = vectors.map((vector) => vector.replace(/^i\((@.*)\)$/, '$1'));
+  return Array.from({ length: Math.ceil(saved.length / savedPerLine) }, (_, line) =>
+    `.save ${saved.slice(line * savedPerLine, (line + 1) * savedPerLine).join(' ')}`);
+}
+
+function decode(
+  values: Readonly<Record<string, number>>, liveNets: readonly string[], placed: readonly PlacedPart[],
+  parts: readonly NetlistPart[], names: EngineNames,
+): OperatingPoint {
+  const sum = (probe: CurrentProbe): number => probe.reduce((total, { vector, sign }) => total + sign * (values[vector] ?? 0), 0);
+  const amps: Record<string, number> = {};
+  for (const part of parts) for (const pin of Object.keys(part.pins)) amps[pinReference(part, pin)] = 0;
+  for (const { part, elements } of placed) {
+    for (const [pin, probe] of Object.entries(elements.currents)) {
+      const into = sum(probe);
+      amps[pinReference(part, pin)] = into;
+      const [other, ...more] = Object.keys(part.pins).filter((name) => name !== pin);
+      if (other !== undefined && more.length === 0 && !(other in elements.currents)) amps[pinReference(part, other)] = -into;
+    }
+  }
+  return {
+    volts: { 0: 0, ...Object.fromEntries(liveNets.map((net) => [net, values[`v(${names.node(net)})`] ?? Number.NaN])) },
+    amps,
+    limited: placed.filter(({ part, elements }) => isLimited(part, elements, sum)).map(({ part }) => part.ref),
+  };
+}
+
+function isLimited(part: NetlistPart, elements: EngineElements, sum: (probe: CurrentProbe) => number): boolean {
+  const limit = limitOf(part, {});
+  const probe = Object.values(elements.currents)[0];
+  return limit !== undefined && probe !== undefined && Math.abs(sum(probe)) > limitedFrom * limit;
+}

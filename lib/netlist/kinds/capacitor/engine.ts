@@ -1,0 +1,3 @@
+import { capacitorEngine as openAtDc } from '../engine-resistive';
+
+export const capacitorEngine = openAtDc(['1', '2']);

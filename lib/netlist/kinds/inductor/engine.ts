@@ -1,0 +1,3 @@
+import { coilEngine } from '../engine-coil';
+
+export const inductorEngine = coilEngine;

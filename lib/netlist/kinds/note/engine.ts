@@ -1,0 +1,3 @@
+import { markEngine } from '../engine-resistive';
+
+export const noteEngine = markEngine;

@@ -1,0 +1,3 @@
+import { bipolarEngine } from '../engine-bipolar';
+
+export const npnEngine = bipolarEngine('npn');

@@ -1,0 +1,3 @@
+import { contactEngine } from '../engine-resistive';
+
+export const plugContactEngine = contactEngine(() => true);

@@ -1,0 +1,3 @@
+import { mosfetEngine } from '../engine-mosfet';
+
+export const pmosEngine = mosfetEngine('p');

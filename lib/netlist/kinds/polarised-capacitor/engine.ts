@@ -1,0 +1,3 @@
+import { capacitorEngine } from '../engine-resistive';
+
+export const polarisedCapacitorEngine = capacitorEngine(['+', '-']);

@@ -1,0 +1,3 @@
+import { contactEngine } from '../engine-resistive';
+
+export const removableLeadEngine = contactEngine(() => true);
