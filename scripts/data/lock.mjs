@@ -4,7 +4,7 @@ import { waitUntil } from '../machine/wait-until.mjs';
 import { Refusal, step } from '../machine/say.mjs';
 import { readPrivate, writePrivate } from './private-file.mjs';
 
-/** @typedef {{ pid: number, identity: string, mark?: string }} Holder `mark` is a piece of its command line */
+/** @typedef {{ name?: string, pid: number, identity: string }} Holder */
 /** @typedef {Holder & { address?: string, parts?: Holder[] }} Lock */
 
 /** @param {Holder | undefined} holder */

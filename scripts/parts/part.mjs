@@ -45,7 +45,7 @@ export class Part {
   /** The running process, as the lock records it. */
   get holder() {
     const pid = this.#child?.pid;
-    return pid === undefined ? undefined : { pid, identity: processIdentity(pid) };
+    return pid === undefined ? undefined : { name: this.plan.name, pid, identity: processIdentity(pid) };
   }
 
   /** Starts the part and waits until it is ready. Rejects with its last lines when it is not in time. */
