@@ -6,7 +6,7 @@ const accountLine = /^(\S+@\S+) {2}([A-Za-z0-9]+) {2}(maker|reviewer|mentor|stew
 
 /**
  * A product as `npm start` gives it, on a data directory and ports of its own, for tests and measurements.
- * @param {{ root: string, dataFolder: string, env?: NodeJS.ProcessEnv }} input
+ * @param {{ root: string, dataFolder: string, env?: Readonly<Record<string, string | undefined>> }} input
  */
 export async function startProduct({ root, dataFolder, env = {} }) {
   const overridden = Object.fromEntries(['PUBLIC_URL', 'HOST', 'REALTIME_PORT', 'REALTIME_URL', 'DATABASE_URL', 'SMTP_URL', 'S3_ENDPOINT', 'S3_BUCKET', 'TRUST_PROXY'].map((name) => [name, '']));

@@ -34,15 +34,15 @@ interface Fixtures {
 const phone = { viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true } as const;
 
 export const test = base.extend<Fixtures>({
-  complaints: [async ({}, use) => {
+  complaints: [async ({}, provide) => {
     const complaints: string[] = [];
-    await use(complaints);
+    await provide(complaints);
     expect(complaints, 'errors in the console').toEqual([]);
   }, { auto: true }],
 
-  stranger: async ({ browser, complaints, baseURL }, use) => {
+  stranger: async ({ browser, complaints, baseURL }, provide) => {
     const open: BrowserContext[] = [];
-    await use(async (options = {}) => {
+    await provide(async (options = {}) => {
       const context = await browser.newContext({
         baseURL, reducedMotion: 'reduce', colorScheme: options.night ? 'dark' : 'light', ...(options.phone ? phone : { viewport: { width: 1440, height: 900 } }),
       });
@@ -55,8 +55,8 @@ export const test = base.extend<Fixtures>({
     await Promise.all(open.map((context) => context.close()));
   },
 
-  signedIn: async ({ stranger, baseURL }, use) => {
-    await use(async (part, options) => {
+  signedIn: async ({ stranger, baseURL }, provide) => {
+    await provide(async (part, options) => {
       const visit = await stranger(options);
       const { email, password } = account(part);
       const answer = await visit.context.request.post('/api/session', {
