@@ -11,6 +11,7 @@ import { EngineNames } from './engine-names';
 import type { PointRequest } from './engine-port';
 import { leakageLine } from './gate-leakage';
 import { runnableParts } from './runnable-parts';
+import { saveLines } from './save-lines';
 
 export interface DeckOptions {
   readonly settings: PartSettings;
@@ -34,8 +35,6 @@ export interface EngineDeck {
 const limitedFrom = 0.999;
 const sheetTemperature = 25;
 const cardTemperature = 27;
-/** ngspice reads long lines badly; a `.save` line holds this many vectors. */
-const savedPerLine = 20;
 
 interface PlacedPart {
   readonly part: NetlistPart;
@@ -105,19 +104,13 @@ function missingFact(part: NetlistPart, fact: string): Refusal {
   return { code: 'missing-fact', words: `${part.ref} ${fact}`, nodes: [], parts: [part.ref] };
 }
 
-function saveLines(vectors: readonly string[]): readonly string[] {
-  const saved = vectors.map((vector) => vector.replace(/^i\((@.*)\)$/, '$1'));
-  return Array.from({ length: Math.ceil(saved.length / savedPerLine) }, (_, line) =>
-    `.save ${saved.slice(line * savedPerLine, (line + 1) * savedPerLine).join(' ')}`);
-}
-
 function decode(
   values: Readonly<Record<string, number>>, liveNets: readonly string[], placed: readonly PlacedPart[],
   parts: readonly NetlistPart[], names: EngineNames,
 ): OperatingPoint {
   const sum = (probe: CurrentProbe): number => probe.reduce((total, { vector, sign }) => total + sign * (values[vector] ?? 0), 0);
   const amps: Record<string, number> = {};
-  for (const part of parts) for (const pin of Object.keys(part.pins)) amps[pinReference(part, pin)] = 0;
+  for (const part of parts.filter(isOpenAtDc)) for (const pin of Object.keys(part.pins)) amps[pinReference(part, pin)] = 0;
   for (const { part, elements } of placed) {
     for (const [pin, probe] of Object.entries(elements.currents)) {
       const into = sum(probe);
@@ -131,6 +124,11 @@ function decode(
     amps,
     limited: placed.filter(({ part, elements }) => isLimited(part, elements, sum)).map(({ part }) => part.ref),
   };
+}
+
+/** A capacitor or an open contact carries nothing, wherever it hangs; what else is left out of a run has no amps. */
+function isOpenAtDc(part: NetlistPart): boolean {
+  return part.kind !== 'box' && kindOf(part.kind).engine.edges(part).every(({ stiffness }) => stiffness === 'none');
 }
 
 function isLimited(part: NetlistPart, elements: EngineElements, sum: (probe: CurrentProbe) => number): boolean {
