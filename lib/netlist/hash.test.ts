@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { buildNetlist } from './connectivity/build-netlist';
-import { pinEnd } from './connectivity/end-key';
+import { pinEnd, type EndKey } from './connectivity/end-key';
 import type { DrawnPart, NetlistSource } from './connectivity/netlist-source';
 import { canonicalJson, contentHash, hashOf } from './hash';
 import { randomSheet } from './testing/random-sheet';
@@ -31,7 +31,7 @@ describe('what changes nothing', () => {
     const sheet = randomSheet(25, random);
     const shuffled = {
       ...sheet, parts: random.shuffle(sheet.parts),
-      joins: random.shuffle(sheet.joins).map(([a, b]) => (random.chance(0.5) ? [a, b] : [b, a]) as const),
+      joins: random.shuffle(sheet.joins).map(([a, b]): [EndKey, EndKey] => (random.chance(0.5) ? [a, b] : [b, a])),
     };
     expect(JSON.stringify(buildNetlist(shuffled))).toBe(JSON.stringify(buildNetlist(sheet)));
     expect(hash(shuffled)).toBe(hash(sheet));

@@ -31,7 +31,7 @@ export function contentHash(netlist: Netlist): string {
   });
 }
 
-function withoutLines(subcircuit: Subcircuit): { readonly name: string; readonly elements: readonly object[] } {
+function withoutLines(subcircuit: Subcircuit): { readonly name: string; readonly [member: string]: unknown } {
   return {
     ...subcircuit,
     elements: subcircuit.elements.map(({ line: _line, ...element }: DeckElement) => element),

@@ -40,6 +40,8 @@ export interface DeckElement {
   readonly model?: string;
   /** Instance parameters (`W`, `L`, `AREA`, `M`, `IC`, `TC1`), lower-case keys. */
   readonly params: Readonly<Record<string, number>>;
+  /** What followed the nodes of an element that is not examined, as written. */
+  readonly text?: string;
   readonly line: number;
 }
 

@@ -1,0 +1,58 @@
+import { closedOhms, openOhms } from '../kinds/element-line';
+import type { KindId } from '../kinds/kind-id';
+import { kindOf } from '../kinds/kind-registry';
+import type { DeckElement, Facts, FactValue, NetlistPart } from '../netlist';
+import { sortedByKey } from '../connectivity/sorted-by-key';
+import { isExamined } from './deck-document';
+import { canonicalKindWord, kindOfWord } from './kind-word';
+import { missingValue } from './read-fact-line';
+
+type ReadFacts = Readonly<Record<string, FactValue>>;
+type MutableFacts = Record<string, FactValue | undefined>;
+
+/** Facts that say how an element is joined or called; once the part is made they are said by its pins and designator. */
+const joining = ['ref', 'pins', 'plus', 'minus', 'anode', 'cathode'];
+
+/** A part of an element, without an id, with nodes in place of nets. The model stays until it is known to say something new. */
+export function elementPart(element: DeckElement, kind: KindId, facts: ReadFacts, pins: Readonly<Record<string, string>>): Omit<NetlistPart, 'id'> {
+  const own: MutableFacts = { ...facts, kind: remainingKind(facts.kind, kind) };
+  const ref = typeof facts.ref === 'string' ? facts.ref : element.name;
+  for (const fact of joining) own[fact] = undefined;
+  if (kind === 'polarised-capacitor') own.polarised = undefined;
+  addValue(own, element, kind);
+  const isWhole = element.letter === 'X' && kind !== 'box';
+  return {
+    ref,
+    kind,
+    pins,
+    facts: sortedByKey(own as Facts),
+    origins: {},
+    ...(element.wave ? { wave: element.wave } : {}),
+    ...(element.model === undefined || isWhole ? {} : { model: element.model }),
+    ...(Object.keys(element.params).length > 0 ? { params: sortedByKey(element.params) } : {}),
+    leftOpen: [],
+  };
+}
+
+/** A `kind=` that became the part's kind is said by it; any other stays as a label. */
+function remainingKind(word: FactValue | undefined, kind: KindId): FactValue | undefined {
+  return kindOfWord(word) === kind ? undefined : (canonicalKindWord(word) ?? word);
+}
+
+function addValue(facts: MutableFacts, element: DeckElement, kind: KindId): void {
+  const isMissing = facts.value === missingValue;
+  if (kind === 'box') {
+    facts.element = element.letter;
+    if (!isExamined(element)) facts.text = element.text || undefined;
+    facts.value = element.value;
+  } else if (kindOf(kind).deck.placeholder !== undefined) {
+    facts.value = isMissing ? undefined : (element.value ?? facts.value);
+  } else if (element.letter === 'R') addContact(facts, element.value, kind);
+}
+
+/** Ohms of an element that is a lead, contact, switch or fuse: its own resistance, or that it is drawn open. */
+function addContact(facts: MutableFacts, ohms: number | undefined, kind: KindId): void {
+  if (ohms === undefined || ohms === closedOhms) return;
+  if (kind !== 'switch' || ohms < openOhms / 1e6) facts.rs ??= ohms;
+  else facts.closed_switch ??= false;
+}

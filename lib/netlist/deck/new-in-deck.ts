@@ -1,0 +1,33 @@
+import { canonicalJson } from '../hash';
+import { kindOf } from '../kinds/kind-registry';
+import type { DeckElement, ModelCard, NetlistPart } from '../netlist';
+import { readDeck } from './read-deck';
+
+/**
+ * The part without a model or a wave that its own facts would give in a written deck: such a card says nothing new, and the part
+ * stays the one that was written (`docs/rules.md`, "Designators").
+ */
+export function withoutRestated<T extends Omit<NetlistPart, 'id'>>(part: T, element: DeckElement, card: ModelCard | undefined): T {
+  if (element.letter === 'V' && part.wave) return withoutWave(part, element);
+  if ((element.letter === 'D' || element.letter === 'Q') && card) return withoutModel(part, element, card);
+  return part;
+}
+
+function withoutWave<T extends Omit<NetlistPart, 'id'>>(part: T, element: DeckElement): T {
+  const { wave, ...bare } = part;
+  const [written] = writtenAgain(bare as T, element)?.elements ?? [];
+  return canonicalJson(written?.wave) === canonicalJson(wave) ? (bare as T) : part;
+}
+
+function withoutModel<T extends Omit<NetlistPart, 'id'>>(part: T, element: DeckElement, card: ModelCard): T {
+  const { model: _model, ...bare } = part;
+  const [written] = writtenAgain(bare as T, element)?.models ?? [];
+  const says = (known: ModelCard | undefined) => known && canonicalJson([known.type, known.params, known.flags]);
+  return says(written) === says(card) ? (bare as T) : part;
+}
+
+function writtenAgain(part: Omit<NetlistPart, 'id'>, element: DeckElement) {
+  const lines = kindOf(part.kind).deck.write({ ...part, id: '' }, element.name, (net) => net);
+  const reading = readDeck(['again', ...lines].join('\n'));
+  return reading.ok ? reading.document : undefined;
+}
