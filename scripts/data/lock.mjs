@@ -5,7 +5,7 @@ import { Refusal, step } from '../machine/say.mjs';
 import { readPrivate, writePrivate } from './private-file.mjs';
 
 /** @typedef {{ name?: string, pid: number, identity: string }} Holder */
-/** @typedef {Holder & { address?: string, parts?: Holder[] }} Lock */
+/** @typedef {Holder & { address?: string, databaseUrl?: string, parts?: Holder[] }} Lock the file is private: it names the database's password */
 
 /** @param {Holder | undefined} holder */
 function lives(holder) {
