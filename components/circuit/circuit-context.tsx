@@ -1,6 +1,5 @@
 'use client';
 import { createContext, useContext } from 'react';
-import type { Action } from '@/lib/access/rights';
 
 /** What the server knew about the reader and the circuit when it sent the page. */
 export interface CircuitPlace {
@@ -9,7 +8,7 @@ export interface CircuitPlace {
   /** Null for a guest. */
   readonly person: { readonly id: string; readonly name: string; readonly email: string } | null;
   /** What the reader may do here: hints for the screen, decided anew by every call. */
-  readonly may: readonly Action[];
+  readonly may: readonly string[];
 }
 
 const CircuitContext = createContext<CircuitPlace | null>(null);
@@ -22,7 +21,7 @@ export function useCircuitPlace(): CircuitPlace {
 }
 
 /** Whether the reader may, as far as the screen knows. */
-export function useMay(): (action: Action) => boolean {
+export function useMay(): (action: string) => boolean {
   const { may } = useCircuitPlace();
   return (action) => may.includes(action);
 }
