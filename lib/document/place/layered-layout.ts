@@ -95,7 +95,8 @@ export async function layeredLayout(blocks: readonly Block[], potential: Potenti
       id: `net ${net} ${index}`, sources: [gives ? port : hub], targets: [gives ? hub : port],
     }));
   }
-  const laid = await new Elk().layout({ id: 'sheet', layoutOptions: options, children, edges });
+  const graph: ElkNode = { id: 'sheet', layoutOptions: options, children, edges };
+  const laid: ElkNode = await new Elk().layout(graph);
   const nodes = new Map(laid.children?.map((child) => [child.id, child]));
   const places = new Map(blocks.map((block) => {
     const node = nodes.get(block.id);
