@@ -155,6 +155,7 @@ CREATE TABLE `findings` (
 	`rule` varchar(60) NOT NULL,
 	`outcome` varchar(20) NOT NULL,
 	`severity` varchar(10) NOT NULL,
+	`refs` json NOT NULL,
 	`from_volts` double,
 	`finding` json NOT NULL,
 	CONSTRAINT `findings_revision_id_position_pk` PRIMARY KEY(`revision_id`,`position`)
@@ -174,6 +175,7 @@ CREATE TABLE `revision_hold_points` (
 	`source` varchar(40) character set utf8mb4 collate utf8mb4_bin,
 	`volts` double NOT NULL,
 	`amps` double NOT NULL,
+	`source_known` boolean NOT NULL,
 	CONSTRAINT `revision_hold_points_revision_id_position_pk` PRIMARY KEY(`revision_id`,`position`),
 	CONSTRAINT `revision_hold_points_name` UNIQUE(`revision_id`,`name`)
 );
@@ -224,7 +226,6 @@ CREATE TABLE `revisions` (
 	`cut_by` char(26) character set ascii collate ascii_bin NOT NULL,
 	`cut_at` datetime(3) NOT NULL,
 	`rules` json NOT NULL,
-	`lifted_runs` json NOT NULL,
 	`asked_at` datetime(3),
 	`asked_by` char(26) character set ascii collate ascii_bin,
 	CONSTRAINT `revisions_id` PRIMARY KEY(`id`),

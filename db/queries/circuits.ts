@@ -69,3 +69,8 @@ export async function uncheckedCircuits(db: Executor, limit: number): Promise<{ 
     .where(and(isNull(circuits.archivedAt), isNull(rtRoom.quarantinedAt), or(isNull(circuitChecks.seq), lt(circuitChecks.seq, rtRoom.headSeq))))
     .limit(limit);
 }
+
+export async function circuitTitle(db: Executor, circuit: CircuitId): Promise<string | undefined> {
+  const [row] = await db.select({ title: circuits.title }).from(circuits).where(eq(circuits.id, circuit));
+  return row?.title;
+}

@@ -9,6 +9,11 @@ export async function accountByEmail(db: Executor, email: string) {
   return row;
 }
 
+export async function personById(db: Executor, person: PersonId) {
+  const [row] = await db.select({ id: people.id, name: people.name, email: people.email }).from(people).where(eq(people.id, person));
+  return row;
+}
+
 export async function ownBenches(db: Executor, person: PersonId) {
   return db.select({ id: benches.id, slug: benches.slug, name: benches.name, role: memberships.role })
     .from(memberships).innerJoin(benches, eq(benches.id, memberships.benchId))

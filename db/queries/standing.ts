@@ -15,13 +15,14 @@ export async function circuitFacts(db: Executor, circuitId: string) {
   return row;
 }
 
-/** A person's role on the circuit's bench and whether they are its maker; nothing for a stranger. */
-export async function standingOf(db: Executor, circuitId: string, personId: string) {
-  const [row] = await db.select({ role: memberships.role, makerRow: circuitMakers.id })
+/** A person's role on the circuit's bench and whether they are its maker; nothing for a stranger. `lock` holds the rows. */
+export async function standingOf(db: Executor, circuitId: string, personId: string, { lock = false } = {}) {
+  const query = db.select({ role: memberships.role, makerRow: circuitMakers.id })
     .from(circuits)
     .innerJoin(memberships, and(eq(memberships.benchId, circuits.benchId), eq(memberships.personId, personId)))
     .leftJoin(circuitMakers, and(eq(circuitMakers.circuitId, circuits.id), eq(circuitMakers.personId, personId), eq(circuitMakers.standing, 1)))
     .where(eq(circuits.id, circuitId));
+  const [row] = await (lock ? query.for('share') : query);
   return row;
 }
 
@@ -30,12 +31,18 @@ export async function circuitOfRevision(db: Executor, revisionId: string) {
   return row?.circuitId;
 }
 
+/**
+ * A person's part in a revision. Contributors are those stored at the cut and every maker of the circuit, also one who
+ * was named later: whoever edits after the cut is among them.
+ */
 export async function partIn(db: Executor, revisionId: string, personId: string) {
-  const [contributor, reviewer] = await Promise.all([
+  const [stored, made, reviewer] = await Promise.all([
     db.$count(revisionContributors, and(eq(revisionContributors.revisionId, revisionId), eq(revisionContributors.personId, personId))),
+    db.select({ id: circuitMakers.id }).from(circuitMakers).innerJoin(revisions, eq(revisions.circuitId, circuitMakers.circuitId))
+      .where(and(eq(revisions.id, revisionId), eq(circuitMakers.personId, personId))).limit(1),
     db.$count(revisionReviewers, and(eq(revisionReviewers.revisionId, revisionId), eq(revisionReviewers.personId, personId))),
   ]);
-  return { contributor: contributor > 0, reviewer: reviewer > 0 };
+  return { contributor: stored > 0 || made.length > 0, reviewer: reviewer > 0 };
 }
 
 /** True for whoever changed the live sheet electrically or was ever its maker. */

@@ -37,6 +37,7 @@ export const rights = {
   'ask for review': row('no', 'maker', 'maker', 'maker'),
   'name makers': row('no', 'poster', 'poster', 'yes'),
   'archive the circuit': row('no', 'poster', 'poster', 'yes'),
+  'say a note is answered': row('no', 'maker', 'maker', 'maker'),
   'resolve a note': row('no', 'author or maker', 'yes', 'yes'),
   'resolve a note that must be answered': row('no', 'author', 'author or not contributor', 'author'),
   'ask for changes': row('no', 'reviewer', 'yes', 'no'),

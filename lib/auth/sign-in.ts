@@ -1,6 +1,8 @@
+import type { PersonId } from '@/db/authorized';
 import type { Database } from '@/db/client';
 import { writeAudit } from '@/db/mutations/audit';
 import { accountByEmail } from '@/db/queries/people';
+import { mintPerson } from '@/lib/access/mint';
 import { Problem } from '@/lib/errors/problem';
 import type { SignIn } from '@/lib/schemas/session';
 import { passwordMatches } from './password';
@@ -15,10 +17,10 @@ export interface SignInContext {
 }
 
 /**
- * Signs a person in and answers the new session's cookie value. An unknown address and a wrong password answer alike and
+ * Signs a person in and answers the new session's cookie value with whose it is. An unknown address and a wrong password answer alike and
  * take alike. Throws `sign-in-failed`, or `too-many` while a wait after wrong passwords is running.
  */
-export async function signIn(db: Database, input: SignIn, context: SignInContext, now = new Date()): Promise<string> {
+export async function signIn(db: Database, input: SignIn, context: SignInContext, now = new Date()): Promise<{ readonly token: string; readonly personId: PersonId }> {
   const key = delayKey(input.email, context.address);
   await refuseWhileWaiting(db, key, now);
   const account = await accountByEmail(db, input.email);
@@ -29,5 +31,5 @@ export async function signIn(db: Database, input: SignIn, context: SignInContext
   await forgiveFailures(db, key);
   const token = await startSession(db, account.id, context.userAgent, now);
   await writeAudit(db, { bench: null, actor: account.id, action: 'signed in', requestId: context.requestId });
-  return token;
+  return { token, personId: mintPerson(account.id) };
 }

@@ -4,8 +4,8 @@ import { revisionStates } from './revision';
 import { idSchema, lineSchema, personRefSchema } from './text';
 
 export const maxDeckBytes = 256 * 1024;
-export const deckSchema = z.string()
-  .refine((deck) => new TextEncoder().encode(deck).length <= maxDeckBytes, 'A deck may have at most 256 KiB.');
+/** A SPICE deck as text. What is wrong with it, its size included, is told by the reader. */
+export const deckSchema = z.string();
 
 /** State of a circuit: its newest revision's, or `draft` before the first cut. */
 export const circuitStates = ['draft', ...revisionStates] as const;
