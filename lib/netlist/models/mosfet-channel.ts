@@ -8,8 +8,10 @@ export interface ChannelSheet {
   /** V_GS and I_D at which R_DS(on) is stated. */
   readonly onVolts: number;
   readonly onAmps: number;
-  /** g_fs and plateau V_GS are taken at `onAmps`. */
+  /** g_fs, siemens, at `transconductanceAmps` (`onAmps` unless given). */
   readonly transconductance?: number;
+  readonly transconductanceAmps?: number;
+  /** Plateau V_GS at `onAmps`. */
   readonly plateau?: number;
 }
 
@@ -64,7 +66,7 @@ function firstKp(sheet: ChannelSheet, rs: number): { readonly kp: number; readon
   const { onAmps, threshold, transconductance: gfs, plateau } = sheet;
   if (gfs !== undefined && gfs * rs < 0.9) {
     const inner = gfs / (1 - gfs * rs);
-    return { kp: (inner * inner) / (2 * onAmps), from: 'transconductance' };
+    return { kp: (inner * inner) / (2 * (sheet.transconductanceAmps ?? onAmps)), from: 'transconductance' };
   }
   const overdrive = (plateau ?? 0) - onAmps * rs - threshold;
   if (plateau !== undefined && overdrive > 0) return { kp: (2 * onAmps) / overdrive ** 2, from: 'plateau' };
