@@ -8,9 +8,9 @@ import { interruption } from './interruption.mjs';
  * @param {import('node:child_process').SpawnOptions & { quiet?: boolean }} [options] `quiet` keeps its output for the error only
  * @returns {Promise<string>} standard output when quiet, else ''. Rejects with the last lines when it ends with another code than 0.
  */
-export function runCommand(command, args, { quiet = false, ...options } = {}) {
+export function runCommand(command, args, { quiet = false, env = process.env, ...options } = {}) {
   return new Promise((resolve, reject) => {
-    const child = spawn(command, args, { stdio: quiet ? ['ignore', 'pipe', 'pipe'] : ['ignore', 'inherit', 'inherit'], signal: interruption.signal, ...options });
+    const child = spawn(command, args, { stdio: quiet ? ['ignore', 'pipe', 'pipe'] : ['ignore', 'inherit', 'inherit'], signal: interruption.signal, ...options, env: quiet ? { ...env, NO_COLOR: '1', FORCE_COLOR: '0' } : env });
     let output = '';
     let everything = '';
     child.stdout?.on('data', (bytes) => { output += bytes; everything += bytes; });
