@@ -17,3 +17,8 @@ export async function durabilityProblem(db: Database): Promise<string | undefine
   if (Number(row.packet) < 16 * 1024 * 1024) return 'max_allowed_packet is under 16 MiB.';
   return undefined;
 }
+
+/** Asks the database for nothing. @throws the driver's error when it does not answer */
+export async function ping(db: Database): Promise<void> {
+  await db.execute(sql`select 1`);
+}

@@ -14,5 +14,5 @@ export async function giveTicket(db: Database, caller: Caller, access: CircuitAc
     : caller.person ? { personId: caller.person.id, sessionId: caller.person.session.id } : undefined;
   const issued = actor && await issueRoomTicket(db, access.circuit, actor);
   if (!issued) throw new Problem('not-found');
-  return { ticket: issued.ticket, url: realtimeAddress(environment(), host), expiresAt: issued.expiresAt.toISOString() };
+  return { ticket: issued.ticket, url: `${realtimeAddress(environment(), host)}/sheet/${access.circuit}`, expiresAt: issued.expiresAt.toISOString() };
 }
