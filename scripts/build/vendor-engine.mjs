@@ -5,6 +5,7 @@ import { fileURLToPath } from 'node:url';
 /**
  * Puts the circuit engine and its browser worker under `public/vendor/engine-<version>/`, where the browser loads them as
  * they stand. Files already there with the same size are left alone; the folder's name changes with the contents.
+ * @param {string} root
  */
 export function vendorEngine(root) {
   const from = path.join(root, 'lib/spice/worker');

@@ -3,7 +3,7 @@ import path from 'node:path';
 import { fileFromRoot } from './file-from-root.mjs';
 import { importRefusal, packageRefusal } from './layers.mjs';
 
-/** No import runs upward; the message names where the code belongs. `lib/netlist` uses relative paths, so that it could stand alone. */
+/** No import runs upward; the message names where the code belongs. `lib/netlist` uses relative paths, so that it could stand alone. @type {import('eslint').Rule.RuleModule} */
 export const importDirection = {
   meta: { type: 'problem', schema: [], messages: { wrong: '{{reason}}' } },
   create(context) {

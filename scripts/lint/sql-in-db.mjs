@@ -4,17 +4,18 @@ const allowed = /^(db\/|tests\/|scripts\/|realtime\/testing\/)|^drizzle\.config\
 /** What builds or sends SQL. lib/auth/session.ts hands Lucia its adapter. */
 const packages = /^(drizzle-orm|mysql2)(\/|$)/;
 
-/** SQL lives in db/: queries read, mutations write. */
+/** SQL lives in db/: queries read, mutations write. @type {import('eslint').Rule.RuleModule} */
 export const sqlInDb = {
   meta: { type: 'problem', schema: [], messages: { wrong: 'SQL lives in db/: put a query in db/queries/ or a mutation in db/mutations/ and call that.' } },
   create(context) {
     if (allowed.test(fileFromRoot(context))) return {};
     return {
       ImportDeclaration(node) {
-        if (packages.test(node.source.value) && node.importKind !== 'type') context.report({ node, messageId: 'wrong' });
+        const forTypes = 'importKind' in node && node.importKind === 'type';
+        if (packages.test(String(node.source.value)) && !forTypes) context.report({ node, messageId: 'wrong' });
       },
       ImportExpression(node) {
-        if (typeof node.source.value === 'string' && packages.test(node.source.value)) context.report({ node, messageId: 'wrong' });
+        if (node.source.type === 'Literal' && packages.test(String(node.source.value))) context.report({ node, messageId: 'wrong' });
       },
     };
   },

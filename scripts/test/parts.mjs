@@ -21,7 +21,8 @@ export const testParts = [
     run: async ({ root, scratch }) => {
       // Route types are made from the routes there are; a deleted one would otherwise haunt the check.
       const generated = await runTool([inPackages(root, 'next/dist/bin/next'), 'typegen', root], { root, scratch });
-      return oneCheck(generated === 0 && (await runTool([inPackages(root, 'typescript/bin/tsc'), '--noEmit'], { root, scratch })) === 0);
+      const check = (/** @type {string} */ project) => runTool([inPackages(root, 'typescript/bin/tsc'), '--noEmit', '--project', path.join(root, project)], { root, scratch });
+      return oneCheck(generated === 0 && (await check('tsconfig.json')) === 0 && (await check('scripts/tsconfig.json')) === 0);
     },
   },
   vitest('repo'),
