@@ -19,6 +19,7 @@ export function elementPart(element: DeckElement, kind: KindId, facts: ReadFacts
   const ref = typeof facts.ref === 'string' ? facts.ref : element.name;
   for (const fact of joining) own[fact] = undefined;
   if (kind === 'polarised-capacitor') own.polarised = undefined;
+  if (kind === 'plug-contact' && own.part_of === ref) own.part_of = undefined;
   addValue(own, element, kind);
   const isWhole = element.letter === 'X' && kind !== 'box';
   return {
@@ -50,9 +51,10 @@ function addValue(facts: MutableFacts, element: DeckElement, kind: KindId): void
   } else if (element.letter === 'R') addContact(facts, element.value, kind);
 }
 
-/** Ohms of an element that is a lead, contact, switch or fuse: its own resistance, or that it is drawn open. */
+/** Ohms of an element that is a lead, contact, switch or fuse: its own resistance, and for a switch whether it is drawn closed. */
 function addContact(facts: MutableFacts, ohms: number | undefined, kind: KindId): void {
-  if (ohms === undefined || ohms === closedOhms) return;
-  if (kind !== 'switch' || ohms < openOhms / 1e6) facts.rs ??= ohms;
-  else facts.closed_switch ??= false;
+  if (ohms === undefined) return;
+  const isOpen = kind === 'switch' && ohms >= openOhms / 1e6;
+  if (kind === 'switch') facts.closed_switch ??= !isOpen;
+  if (!isOpen && ohms !== closedOhms) facts.rs ??= ohms;
 }

@@ -27,7 +27,7 @@ function subcircuit(part: NetlistPart, name: string, type: 'nmos' | 'pmos'): str
   const vto = threshold(part);
   const ohms = numberOf(part, 'rds_on') ?? stand.ohms;
   const overdrive = Math.max((magnitude(part, 'rds_on_spec_vgs') ?? stand.volts) - vto, 0.1);
-  const kp = Number((1 / (0.5 * ohms * overdrive)).toPrecision(6));
+  const kp = rounded(1 / (0.5 * ohms * overdrive));
   const crss = numberOf(part, 'crss');
   const gateSource = difference(numberOf(part, 'ciss'), crss);
   const drainSource = difference(numberOf(part, 'coss'), crss);
@@ -37,14 +37,19 @@ function subcircuit(part: NetlistPart, name: string, type: 'nmos' | 'pmos'): str
     `M1 d g s s ${name}_CH W=1e-4 L=1e-4`,
     `D1 ${diodeNodes} ${name}_BD`,
     ...capacitor('CGS', 'g s', gateSource), ...capacitor('CGD', 'g d', crss), ...capacitor('CDS', 'd s', drainSource),
-    modelLine(`${name}_CH`, type, { level: 1, vto: sign * vto, kp, rd: 0.4 * ohms, rs: 0.1 * ohms }),
+    modelLine(`${name}_CH`, type, { level: 1, vto: sign * vto, kp, rd: rounded(0.4 * ohms), rs: rounded(0.1 * ohms) }),
     modelLine(`${name}_BD`, 'd', { is: 1e-12, n: 1.1, bv: magnitude(part, 'vds_max') ?? stand.drainVolts, ibv: 2.5e-4 }),
     '.ends',
   ];
 }
 
+/** Six digits: far finer than any data sheet, short enough to read. */
+function rounded(value: number): number {
+  return Number(value.toPrecision(6));
+}
+
 function difference(whole: number | undefined, part: number | undefined): number | undefined {
-  return whole === undefined ? undefined : Math.max(whole - (part ?? 0), 0);
+  return whole === undefined ? undefined : rounded(Math.max(whole - (part ?? 0), 0));
 }
 
 function capacitor(name: string, nodes: string, farads: number | undefined): string[] {

@@ -31,6 +31,7 @@ function randomPart(index: number, random: SeededRandom): DrawnPart {
   const { letter } = kindOf(kind);
   const facts = randomFacts(kind, random);
   if (kind === 'plug-contact') facts.contact = String(index);
+  if (kind === 'switch') facts.closed_switch = random.chance(0.5);
   return { id: `id${index}`, ref: letter === null ? '' : `${letter}${index}`, kind, facts, origins: {}, leftOpen: [] };
 }
 

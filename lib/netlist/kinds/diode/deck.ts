@@ -1,4 +1,11 @@
-import { diodeDeck } from '../exchange-diode';
+import { diodeModel } from '../../models/diode-model';
+import { cardedDeck } from '../exchange-card';
 
-/** Silicon rectifier where the sheet is silent: 0.7 V at 10 mA. */
-export const diodeKindDeck = diodeDeck('DIODE', () => ({ volts: 0.7, amps: 0.01, n: 1.8, rs: 0.05 }), true);
+export const diodeKindDeck = cardedDeck({
+  letter: 'D',
+  pins: ['A', 'K'],
+  suffix: 'DIODE',
+  modelOf: (part) => diodeModel(part.facts, 'diode'),
+  stand: { type: 'd', params: {}, flags: [] },
+  read: (element) => element.letter === 'D',
+});

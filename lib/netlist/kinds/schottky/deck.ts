@@ -1,4 +1,10 @@
-import { diodeDeck } from '../exchange-diode';
+import { diodeModel } from '../../models/diode-model';
+import { cardedDeck } from '../exchange-card';
 
-/** Power Schottky where the sheet is silent: 0.45 V at 100 mA. */
-export const schottkyDeck = diodeDeck('SCHOTTKY', () => ({ volts: 0.45, amps: 0.1, n: 1.2, rs: 0.05 }));
+export const schottkyDeck = cardedDeck({
+  letter: 'D',
+  pins: ['A', 'K'],
+  suffix: 'SCHOTTKY',
+  modelOf: (part) => diodeModel(part.facts, 'schottky'),
+  stand: { type: 'd', params: {}, flags: [] },
+});

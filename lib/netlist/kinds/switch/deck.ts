@@ -1,4 +1,4 @@
 import { contactDeck } from '../element-line';
 
-/** As drawn: closed unless the sheet draws it open. */
-export const switchDeck = contactDeck((part) => part.facts.closed_switch !== false);
+/** As drawn: open unless the sheet draws it closed. */
+export const switchDeck = contactDeck((part) => part.facts.closed_switch === true);

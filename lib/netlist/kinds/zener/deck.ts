@@ -1,4 +1,10 @@
-import { diodeDeck } from '../exchange-diode';
+import { zenerModel } from '../../models/zener-model';
+import { cardedDeck } from '../exchange-card';
 
-/** Forward branch where the sheet is silent: 0.75 V at 10 mA. */
-export const zenerDeck = diodeDeck('ZENER', () => ({ volts: 0.75, amps: 0.01, n: 1.5, rs: 1 }));
+export const zenerDeck = cardedDeck({
+  letter: 'D',
+  pins: ['A', 'K'],
+  suffix: 'ZENER',
+  modelOf: (part) => zenerModel(part.facts),
+  stand: { type: 'd', params: {}, flags: [] },
+});
