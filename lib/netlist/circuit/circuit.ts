@@ -2,8 +2,11 @@ import type { Net, Netlist, NetlistPart } from '../netlist';
 import { findControllerPins, type ControllerPin } from './controller-pins';
 import { buildGraph, type Graph } from './graph';
 import { findLeads, type LeadGroup } from './leads';
+import { findLedBranches, type LedBranch } from './led-branches';
 import { findMainsNets } from './mains-fed';
 import { findRails, findStiffNets } from './rails';
+import { findSmoothedNets } from './smoothed';
+import { isAlternating } from './source-role';
 import { findSources, type Sources } from './sources';
 import { findStages, type Stage } from './stages';
 
@@ -21,6 +24,9 @@ export interface Circuit {
   readonly controllerPins: readonly ControllerPin[];
   /** Nets that a mains source feeds. */
   readonly mainsNets: ReadonlySet<string>;
+  /** Nets that a capacitor holds up between the peaks of an alternating source; empty without one. */
+  readonly smoothedNets: ReadonlySet<string>;
+  readonly ledBranches: readonly LedBranch[];
   partById(id: string): NetlistPart | undefined;
   /** First part with this designator. */
   partByRef(ref: string): NetlistPart | undefined;
@@ -41,6 +47,8 @@ export function buildCircuit(netlist: Netlist): Circuit {
     leads: findLeads(netlist.parts),
     controllerPins: findControllerPins(graph, netlist.parts),
     mainsNets: findMainsNets(graph, netlist.parts, rails),
+    smoothedNets: sources.supplies.some(isAlternating) ? findSmoothedNets(graph, netlist.parts, rails) : new Set(),
+    ledBranches: findLedBranches(graph, rails),
     partById: (id) => byId.get(id),
     partByRef: (ref) => byRef.get(ref),
     net: (name) => nets.get(name),
