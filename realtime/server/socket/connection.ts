@@ -17,6 +17,8 @@ export interface ConnectionHost {
   joined(connection: Connection): boolean;
   ended(connection: Connection): void;
   failed(error: unknown): void;
+  /** Milliseconds over which clients come back after a restart. */
+  restartSpread(): number;
 }
 
 /** One sheet socket: silent until its hello is accepted, then a member of its room. */
@@ -56,7 +58,8 @@ export class Connection {
   close(reason: CloseReason): void {
     if (this.phase === 'ended') return;
     this.end();
-    this.socket.close(closeCodes[reason].code, reason);
+    // A restart spreads those who come back, the more of them the longer.
+    this.socket.close(closeCodes[reason].code, reason === 'restarting' ? `restarting ${this.host.restartSpread()}` : reason);
     // A peer that does not answer the closing handshake is let go by force.
     setTimeout(() => this.socket.terminate(), 2_000).unref();
   }

@@ -45,6 +45,7 @@ export function serveSockets(
           connections.remove(ended);
           rooms.release(check.roomId);
         },
+        restartSpread: () => Math.min(10_000, 40 * connections.size),
         failed: (error) => context.log.error({ circuitId: check.roomId, err: error }, 'a sheet socket failed'),
       });
       connections.add(connection, address);
