@@ -30,7 +30,7 @@ export function deckLines(text: string): DeckLines {
     if (raw.length > deckLimits.joinedLine) throw tooLong(line);
     if (index === 0) continue;
     const trimmed = raw.trim();
-    if (trimmed.startsWith('*@')) facts.push({ text: trimmed.slice(2), line });
+    if (trimmed.startsWith('*@')) facts.push({ text: trimmed.slice(2).trim(), line });
     else if (!trimmed.startsWith('*')) addStatement(statements, withoutComment(trimmed), line);
     if (/^\.end$/i.test(trimmed)) break;
   }

@@ -55,6 +55,8 @@ describe('refusals carry line and reason', () => {
     ['V1 a 0 PWL(0 0 1)', 'V1: PWL takes pairs of time and value.'],
     ['V1 a 0 SIN(0 1', 'The parentheses do not pair.'],
     ['V1 a 0 SIN 0 1) 2', 'The parentheses do not pair.'],
+    ['D1 a k DD 2 3', 'D1: 3 is not understood after its model DD.'],
+    ['Q1 c b e QQ big', 'Q1: big is not understood after its model QQ.'],
     ['Q1 c b NPN', 'Q1 has too few nodes or no model: it takes 3 nodes and a model.'],
     ['M1 d g s MM', 'M1 has too few nodes or no model: it takes 4 nodes and a model.'],
     ['D1 a k', 'D1 has too few nodes or no model: it takes 2 nodes and a model.'],
@@ -128,6 +130,11 @@ describe('statements', () => {
     ]);
   });
 
+  test('an = is as good as a space; a bare number after a model is its area', () => {
+    const { elements } = document('V1 a 0 DC = 5', 'R1 a b R=1k TC1=1m', 'D1 a k DD 2 OFF', 'R2 a b {x}', '.param x=1M');
+    expect(elements.map(({ value, params }) => [value, params])).toEqual([[5, {}], [1_000, { tc1: 1e-3 }], [undefined, { area: 2 }], [1e-3, {}]]);
+  });
+
   test('.param is a number that {name} stands for, wherever it is written', () => {
     expect(document('R1 a b {Rg}', '.param rg = 47 half={RG}', 'R2 a b {half}').elements.map(({ value }) => value)).toEqual([47, 47]);
   });
@@ -162,7 +169,7 @@ describe('statements', () => {
 
 describe('fact lines', () => {
   test('values by the vocabulary', () => {
-    const { factLines, notices } = document('R1 a 0 1k', '*@R1 pmax=0.25W VMAX=250 wire=no range=1k..10k part="two words" fuse=2 package=0805 note=a = b ; c');
+    const { factLines, notices } = document('R1 a 0 1k', '*@R1 pmax=0.25W VMAX=250 wire = no range=1k..10k part="two words" fuse=2 package=0805 note=a = b ; c');
     expect(factLines).toEqual([{ line: 3, name: 'R1', facts: {
       pmax: 0.25, vmax: 250, wire: false, range: [1_000, 10_000], part: 'two words', fuse: 2, package: '0805', note: 'a = b ; c',
     } }]);
@@ -170,8 +177,8 @@ describe('fact lines', () => {
   });
 
   test('unknown keys and values are kept and told; nothing is an error', () => {
-    const { factLines, notices } = document('R1 a 0 1k', '*@R1 shape=round pmax=lots wire=maybe vmax', '*@R1', '*@', '*@R1 hfe_min=-5 ; cut');
+    const { factLines, notices } = document('R1 a 0 1k', '*@R1 shape=round pmax=lots wire=maybe vmax', '*@R1', '*@', '*@ R1 hfe_min=-5 =3 ; cut');
     expect(factLines.map(({ facts }) => facts)).toEqual([{ shape: 'round', pmax: 'lots', wire: 'maybe' }, { hfe_min: -5 }]);
-    expect(notices.map(({ line }) => line)).toEqual([3, 3, 3, 3, 4, 5, 6]);
+    expect(notices.map(({ line }) => line)).toEqual([3, 3, 3, 3, 4, 5, 6, 6]);
   });
 });

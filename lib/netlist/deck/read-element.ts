@@ -17,7 +17,7 @@ export interface ElementContext {
   model(key: string): ModelCard | undefined;
 }
 
-type Body = Partial<Pick<DeckElement, 'value' | 'wave' | 'model'>> & Pick<DeckElement, 'nodes'>;
+type Body = Partial<Pick<DeckElement, 'value' | 'wave' | 'model'>> & Pick<DeckElement, 'nodes'> & { readonly area?: number };
 
 /** Reads an element statement. Throws `DeckRefusal` on one that no SPICE could take either. */
 export function readElement({ text, line }: DeckLine, context: ElementContext): DeckElement {
@@ -25,19 +25,32 @@ export function readElement({ text, line }: DeckLine, context: ElementContext): 
   checkName(name, 'The element', line);
   const letter = name.charAt(0).toUpperCase();
   if (!examinedLetters.includes(letter)) return unexaminedElement(letter, name, text, line, context.notices);
-  const { words, pairs } = splitPairs(tokensOf(text, line), line);
-  const body = readBody(letter, name, words.slice(1), context, line);
+  const tokens = tokensOf(text, line).filter((token) => token.kind !== 'equals' || !isSource(letter));
+  const { words, pairs } = splitPairs(tokens, line);
+  const body = readBody(letter, name, [...words.slice(1), ...ownValue(letter, pairs)], context, line);
   for (const node of body.nodes) checkName(node, `A node of ${name}`, line);
-  return { letter, name, ...body, params: readParams(letter, name, pairs, context, line), line };
+  const { area, ...rest } = body;
+  const params = readParams(letter, name, pairs, context, line);
+  return { letter, name, ...rest, params: area === undefined ? params : { area, ...params }, line };
+}
+
+/** `DC=5` is as good as `DC 5`. */
+function isSource(letter: string): boolean {
+  return letter === 'V' || letter === 'I';
+}
+
+/** `R1 a b R=1k`: the value of a passive element under its own letter. */
+function ownValue(letter: string, pairs: readonly Pair[]): Token[] {
+  return 'RCL'.includes(letter) ? pairs.filter(({ key }) => key === letter.toLowerCase()).map(({ value }) => value) : [];
 }
 
 function readBody(letter: string, name: string, words: readonly Token[], context: ElementContext, line: number): Body {
   switch (letter) {
     case 'R': case 'C': case 'L': return passive(name, words, context, line);
     case 'V': case 'I': return { nodes: nodes(name, words, 2, line), ...readSource(name, words.slice(2), context.numbers, line) };
-    case 'D': return withModel(name, words, 2, line);
-    case 'Q': return withModel(name, words, bipolarNodes(words, context), line);
-    case 'M': return withModel(name, words, mosfetNodes(words, context), line);
+    case 'D': return withModel(name, words, 2, context, line);
+    case 'Q': return withModel(name, words, bipolarNodes(words, context), context, line);
+    case 'M': return withModel(name, words, mosfetNodes(words, context), context, line);
     default: return subcircuitCall(name, words, line);
   }
 }
@@ -63,18 +76,22 @@ function passive(name: string, words: readonly Token[], { numbers, notices }: El
   const value = numbers.tryRead(third, line);
   if (value !== undefined && fourth) throw new DeckRefusal(line, `${name}: ${fourth.text} is not understood after its value.`);
   if (value === undefined && (third.kind !== 'word' || !/^[A-Za-z_]/.test(third.text))) numbers.read(third, line);
-  if (readsAsMilli(third.text)) notices.push({ line, text: `${name}: ${third.text} is a thousandth in a deck; a million is written MEG.` });
+  if (third.kind === 'word' && readsAsMilli(third.text)) notices.push({ line, text: `${name}: ${third.text} is a thousandth in a deck; a million is written MEG.` });
   if (value !== undefined) return { nodes: ends, value };
   return { nodes: ends, model: third.text, ...(fourth ? { value: numbers.read(fourth, line) } : {}) };
 }
 
-function withModel(name: string, words: readonly Token[], count: number, line: number): Body {
+/** Nodes, a model, then at most an area and OFF. */
+function withModel(name: string, words: readonly Token[], count: number, { numbers }: ElementContext, line: number): Body {
   const found = nodes(name, words, count, line);
   const [model, ...rest] = words.slice(count);
   if (model?.kind !== 'word') throw new DeckRefusal(line, `${name} has too few nodes or no model: it takes ${count} nodes and a model.`);
-  const extra = rest.find((token) => !/^(?:off|[0-9.]+)$/i.test(token.text));
+  const [area, extra] = rest.filter((token) => token.text.toLowerCase() !== 'off');
   if (extra) throw new DeckRefusal(line, `${name}: ${extra.text} is not understood after its model ${model.text}.`);
-  return { nodes: found, model: model.text };
+  if (!area) return { nodes: found, model: model.text };
+  const number = numbers.tryRead(area, line);
+  if (number === undefined) throw new DeckRefusal(line, `${name}: ${area.text} is not understood after its model ${model.text}.`);
+  return { nodes: found, model: model.text, area: number };
 }
 
 /** Three nodes, or four with a substrate: the word after the fourth node is then the model. */
@@ -98,6 +115,7 @@ function subcircuitCall(name: string, words: readonly Token[], line: number): Bo
 function readParams(letter: string, name: string, pairs: readonly Pair[], context: ElementContext, line: number): Record<string, number> {
   const params: Record<string, number> = {};
   for (const { key, value } of pairs) {
+    if (ownValue(letter, [{ key, value }]).length > 0) continue;
     if (letter === 'X') throw new DeckRefusal(line, `${name}: parameters of a subcircuit are not read; put the numbers into the subcircuit.`);
     if (instanceParameters[letter]?.has(key)) params[key] = context.numbers.read(value, line);
     else context.notices.push({ line, text: `${name}: the parameter ${key} is not known and left out.` });

@@ -13,7 +13,7 @@ export function readFactLine({ text, line }: DeckLine, notices: DeckNotice[]): F
   while (rest !== '' && !rest.startsWith(';')) {
     const { word, raw, after } = nextFact(rest);
     rest = after;
-    if (raw === undefined) notices.push({ line, text: `${word} on the fact line of ${name} has no value and is skipped.` });
+    if (raw === undefined || word === '') notices.push({ line, text: `${word || '='} on the fact line of ${name} is no key=value and is skipped.` });
     else addFact(facts, word.toLowerCase(), raw, name, line, notices);
   }
   if (name === '' || Object.keys(facts).length === 0) {
@@ -23,16 +23,16 @@ export function readFactLine({ text, line }: DeckLine, notices: DeckNotice[]): F
   return { line, name, facts };
 }
 
-/** The next `key=value`; a value in double quotes may hold spaces, `note=` takes the rest of the line. */
+/** The next `key=value`, spaces round the = allowed; a value in double quotes may hold spaces, `note=` takes the rest of the line. */
 function nextFact(text: string): { word: string; raw?: string; after: string } {
-  const equals = text.search(/[=\s]/);
-  const word = equals < 0 ? text : text.slice(0, equals);
-  if (equals < 0 || text[equals] !== '=') return { word, after: text.slice(word.length).trim() };
-  const tail = text.slice(equals + 1);
-  if (word.toLowerCase() === 'note') return { word, raw: tail.trim(), after: '' };
+  const word = /^[^=\s]*/.exec(text)?.[0] ?? '';
+  const afterWord = text.slice(word.length).trimStart();
+  if (!afterWord.startsWith('=')) return { word, after: afterWord };
+  const tail = afterWord.slice(1).trimStart();
+  if (word.toLowerCase() === 'note') return { word, raw: tail, after: '' };
   if (tail.startsWith('"')) return { word, ...quoted(tail) };
   const raw = /^\S*/.exec(tail)?.[0] ?? '';
-  return { word, raw, after: tail.slice(raw.length).trim() };
+  return { word, raw, after: tail.slice(raw.length).trimStart() };
 }
 
 function quoted(text: string): { raw: string; after: string } {
