@@ -1,6 +1,9 @@
 /** Progress for the person at the terminal: plain lines, bold only on a terminal that wants colour. */
 const colour = process.stdout.isTTY && !process.env.NO_COLOR;
 
+// A reader that went away (a closed terminal, `| head`) must not end what is running.
+for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {});
+
 /** @param {string} text */
 export function say(text) {
   process.stdout.write(`${text}\n`);

@@ -58,6 +58,7 @@ export function product({ root, dev, env: given }) {
     else vendorEngine(root);
 
     const env = partEnvironment({ given, settings, ports, data, databaseUrl: databaseUrl ?? '', internalSecret: kept.internalSecret, build });
+    step('Bringing the database up to date');
     await runProgram({ root, build, name: 'migrate', env });
     if (ports.local) await runProgram({ root, build, name: 'seed', env: { ...env, DEMO_ACCOUNTS: data.demoAccounts } });
 
