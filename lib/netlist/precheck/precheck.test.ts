@@ -1,13 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import type { KindId } from '../kinds/kind-id';
 import type { Facts, NetlistPart } from '../netlist';
+import { barePart as part, bareTwoPin as two } from '../testing/bare-netlist';
 import { precheck, type PrecheckCode } from './precheck';
 
-function part(kind: KindId, ref: string, pins: Record<string, string>, facts: Facts = {}): NetlistPart {
-  return { id: ref, ref, kind, pins, facts, origins: {}, leftOpen: [] };
-}
-const two = (kind: KindId, ref: string, from: string, to: string, facts: Facts = {}): NetlistPart =>
-  part(kind, ref, { 1: from, 2: to }, facts);
 const source = (ref: string, from: string, to: string, facts: Facts = {}): NetlistPart =>
   part('dc-source', ref, { '+': from, '-': to }, { value: 12, ...facts });
 const junction = (kind: KindId, ref: string, from: string, to: string): NetlistPart => part(kind, ref, { A: from, K: to });
