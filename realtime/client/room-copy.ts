@@ -58,14 +58,9 @@ export class RoomCopy implements SocketOwner {
     this.WebSocket = host.WebSocket;
     const awareness = new Awareness(this.doc);
     awareness.setLocalState(null);
-    const owner = this;
     this.provider = new WebsocketProvider('sheet:', 'sheet', this.doc, {
       connect: false, disableBc: true, awareness, maxBackoffTime: host.longestPause, shouldReconnect,
-      WebSocketPolyfill: class extends SheetSocket {
-        constructor() {
-          super(owner);
-        }
-      } as unknown as typeof WebSocket,
+      WebSocketPolyfill: socketFor(this),
     });
     this.doc.on('update', (update: Uint8Array, origin: unknown) => {
       if (origin !== this.provider && origin !== keptEdits) this.edited(update);
@@ -223,3 +218,11 @@ export class RoomCopy implements SocketOwner {
   }
 }
 
+/** The provider constructs its sockets itself: it gets a class whose sockets all serve one copy. */
+function socketFor(owner: SocketOwner): typeof WebSocket {
+  return class extends SheetSocket {
+    constructor() {
+      super(owner);
+    }
+  } as unknown as typeof WebSocket;
+}

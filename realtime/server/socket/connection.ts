@@ -1,5 +1,5 @@
 import { randomBytes } from 'node:crypto';
-import { WebSocket } from 'ws';
+import type { WebSocket } from 'ws';
 import { closeCodes, type CloseReason } from '@/realtime/close-codes';
 import { limits, maxEditBytes } from '@/realtime/limits';
 import { readPresenceFields } from '@/realtime/presence-fields';
