@@ -1,0 +1,45 @@
+import { boxHalfHeight, boxPinPlaces } from '@/lib/document/geometry/kind-shape';
+import { placed } from '@/lib/document/geometry/turn';
+import type { PartRecord } from '@/lib/document/records';
+import { kindRegistry } from '@/lib/netlist/kinds/kind-registry';
+import { ownWords } from './part-words';
+import { SymbolView } from './symbol-view';
+
+/** A box stands for an element that has no kind of its own: its pins by name. */
+function BoxView({ part }: { readonly part: PartRecord }) {
+  const names = part.boxPins ?? [];
+  const half = boxHalfHeight(names.length);
+  return (
+    <>
+      <path d={`M-30 ${-half}H30V${half}H-30Z`} className="fill-film stroke-ink" strokeWidth="1.5" />
+      {boxPinPlaces(names).map((pin) => <path key={pin.name} d={`M${pin.x} ${pin.y}H${pin.x < 0 ? -30 : 30}`} className="stroke-ink" strokeWidth="1.5" />)}
+    </>
+  );
+}
+
+function NoteView({ part }: { readonly part: PartRecord }) {
+  const lines = ownWords(part).split('\n').slice(0, 12);
+  return <text x={part.x - 30} y={part.y - 4} className="fill-ink-2 font-sans text-xs">{lines.map((line, index) => <tspan key={index} x={part.x - 30} dy={index === 0 ? 0 : 16}>{line}</tspan>)}</text>;
+}
+
+/** Words of a net name, upright whatever the turn of its mark. */
+function NetNameWords({ part }: { readonly part: PartRecord }) {
+  const upright = part.turn === 90 || part.turn === 270;
+  const at = placed({ x: 14, y: 0 }, part);
+  const leftwards = at.x < part.x;
+  return (
+    <text x={at.x} y={upright ? at.y + (at.y < part.y ? -2 : 12) : at.y + 4.3} textAnchor={upright ? 'middle' : leftwards ? 'end' : 'start'} className="paint-film fill-ink-2 font-cond text-xs font-semibold tracking-[.06em]">{ownWords(part)}</text>
+  );
+}
+
+/** One part where it stands on the sheet, without its words at the side. */
+export function PartView({ part }: { readonly part: PartRecord }) {
+  if (part.kind === 'note') return <NoteView part={part} />;
+  const pose = `translate(${part.x} ${part.y})${part.turn === 0 ? '' : ` rotate(${part.turn})`}${part.mirror ? ' scale(-1 1)' : ''}`;
+  return (
+    <>
+      <g transform={pose}>{part.kind === 'box' ? <BoxView part={part} /> : <SymbolView art={kindRegistry[part.kind].symbol} />}</g>
+      {part.kind === 'net-name' ? <NetNameWords part={part} /> : null}
+    </>
+  );
+}
