@@ -16,6 +16,7 @@ export type PointRun =
 export async function runPoint(engine: PointEngine, netlist: Netlist, options: DeckOptions): Promise<PointRun> {
   const deck = buildEngineDeck(netlist, options);
   if ('code' in deck) return { status: 'refused', refusal: deck };
+  if (deck.request.vectors.length === 0) return { status: 'ok', op: deck.decode({}), assumed: deck.assumed };
   const answer = await engine.simulate(deck.request);
   if (!('values' in answer)) return { status: 'refused', refusal: engineRefusal(answer.status, answer.messages, deck.names) };
 

@@ -22,14 +22,15 @@ const siliconGap = 1.11;
  */
 export function fitZener(sheet: ZenerSheet): FittedModel['card'] {
   const { vz, izt, zzt, knee, forward } = sheet;
-  let nbv = Math.min(1, (zzt * izt) / thermalVoltage);
-  let rs = zzt - (nbv * thermalVoltage) / izt;
+  const slope = (zzt * izt) / thermalVoltage;
+  let nbv = Math.min(1, slope);
+  let rs = slope > 1 ? zzt - thermalVoltage / izt : 0;
   if (knee !== undefined) {
     nbv = (knee.zzk - zzt) / (thermalVoltage * (1 / knee.izk - 1 / izt));
     rs = zzt - (nbv * thermalVoltage) / izt;
     if (rs < 0) {
       rs = 0;
-      nbv = (zzt * izt) / thermalVoltage;
+      nbv = slope;
     }
   }
   // A high-resistance zener would leave the forward point nothing but its series resistance.
