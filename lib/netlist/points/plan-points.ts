@@ -10,7 +10,8 @@ import { drawnVolts, type Station } from './station';
 export interface PointSpec {
   readonly key: PointKey;
   readonly station: Station;
-  readonly ambient: number;
+  /** °C of the scenario; undefined leaves the engine's own. */
+  readonly ambient: number | undefined;
   readonly corner: Corner;
   /** By part id. */
   readonly settings: Readonly<Record<string, PartSetting>>;
@@ -19,7 +20,7 @@ export interface PointSpec {
 }
 
 /** Top of the band of an alternating source: IEC 60038 gives ±10 % (`sources.md` 3). */
-const bandTop = 1.1;
+export const alternatingBandTop = 1.1;
 const raised = 1.1;
 
 type Settings = Readonly<Record<string, PartSetting>>;
@@ -30,7 +31,7 @@ function levelSettings(circuit: Circuit, station: Station, level: Level): Settin
   for (const part of circuit.sources.supplies) {
     const volts = settings[part.id]?.volts ?? drawnVolts(part);
     if (volts === undefined) continue;
-    if (isAlternating(part)) settings[part.id] = { ...settings[part.id], volts: sign * Math.SQRT2 * volts * bandTop };
+    if (isAlternating(part)) settings[part.id] = { ...settings[part.id], volts: sign * Math.SQRT2 * volts * alternatingBandTop };
     else if (level === '+10 %' && (station.power === null || station.power.id === part.id)) settings[part.id] = { ...settings[part.id], volts: volts * raised };
   }
   return settings;
@@ -56,7 +57,7 @@ function spec(circuit: Circuit, station: Station, level: Level, drive: Drive): P
       holdPoint: station.holdPoint, scenario: station.scenario, volts: station.volts, level, state: drive.state, corner: 'typ',
       ...(drive.control === undefined ? {} : { control: drive.control }),
     },
-    station, ambient: station.ambient, corner: 'typ',
+    station, ambient: station.scenario === null ? undefined : station.ambient, corner: 'typ',
     settings: merged(levelSettings(circuit, station, level), drive.settings),
     ...(refusal ? { refusal } : {}),
   };
