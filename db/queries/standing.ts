@@ -1,4 +1,5 @@
 import { and, eq, isNull, sql } from 'drizzle-orm';
+import type { BenchRole } from '@/lib/schemas/bench';
 import type { Executor } from '../client';
 import { circuitMakers, circuits, guestLinks } from '../schema/circuits';
 import { benches, memberships } from '../schema/people';
@@ -17,13 +18,14 @@ export async function circuitFacts(db: Executor, circuitId: string) {
 
 /** A person's role on the circuit's bench and whether they are its maker; nothing for a stranger. `lock` holds the rows. */
 export async function standingOf(db: Executor, circuitId: string, personId: string, { lock = false } = {}) {
-  const query = db.select({ role: memberships.role, makerRow: circuitMakers.id })
-    .from(circuits)
-    .innerJoin(memberships, and(eq(memberships.benchId, circuits.benchId), eq(memberships.personId, personId)))
-    .leftJoin(circuitMakers, and(eq(circuitMakers.circuitId, circuits.id), eq(circuitMakers.personId, personId), eq(circuitMakers.standing, 1)))
-    .where(eq(circuits.id, circuitId));
-  const [row] = await (lock ? query.for('share') : query);
-  return row;
+  // Drizzle writes `for share`, which MariaDB does not know.
+  const [rows] = await db.execute(sql`select ${memberships.role} as role, ${circuitMakers.id} as makerRow
+    from ${circuits}
+    join ${memberships} on ${memberships.benchId} = ${circuits.benchId} and ${memberships.personId} = ${personId}
+    left join ${circuitMakers} on ${circuitMakers.circuitId} = ${circuits.id} and ${circuitMakers.personId} = ${personId}
+      and ${circuitMakers.standing} = 1
+    where ${circuits.id} = ${circuitId} ${lock ? sql`lock in share mode` : sql``}`) as unknown as [{ role: BenchRole; makerRow: string | null }[]];
+  return rows[0];
 }
 
 export async function circuitOfRevision(db: Executor, revisionId: string) {

@@ -22,6 +22,7 @@ import { readLiveSheet, type LiveSheet } from '@/lib/rooms/live-sheet';
 import type { Cut } from '@/lib/schemas/revision';
 import { entry, first, refuseArchived, repeat, type Act, type Outcome } from './act';
 import { checkCopy, type CheckedCopy } from './check-copy';
+import { withinPatience } from './check-on-server';
 
 /**
  * Cuts a revision: a full copy of the committed sheet at one seq, its netlist as rows, and what the server's own checks say of
@@ -37,7 +38,7 @@ export async function cutRevision(act: Act, access: CircuitAccess, input: Cut): 
     throw new Problem('sheet-moved', `You looked at change ${input.seq}; the sheet is at change ${live.seq}.`);
   }
   const netlist = sheetToNetlist(live.sheet, await circuitTitle(act.db, access.circuit) ?? live.sheet.title);
-  const checked = await checkCopy(netlist);
+  const checked = await withinPatience(checkCopy(netlist));
   try {
     return await inTransaction(act.db, (tx) => store(tx, act, access, input, live, netlist, checked));
   } catch (error) {

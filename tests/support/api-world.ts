@@ -13,7 +13,7 @@ export interface TestPerson { readonly id: string; readonly name: string; readon
 export interface TestBench { readonly id: string; readonly slug: string }
 
 export interface CallOptions {
-  readonly params?: Record<string, string>;
+  readonly params?: Readonly<Record<string, string>>;
   readonly query?: Record<string, string>;
   readonly body?: unknown;
   readonly headers?: Record<string, string>;
@@ -27,7 +27,7 @@ export class ApiWorld {
   private constructor(readonly db: Database, readonly rooms: InProcessRooms) {}
 
   static async start(): Promise<ApiWorld> {
-    Object.assign(process.env, { DATABASE_URL: await freshDatabase(), PUBLIC_URL: origin, INTERNAL_SECRET: 'x'.repeat(32), LOG_LEVEL: 'silent', NODE_ENV: 'test' });
+    Object.assign(process.env, { DATABASE_URL: await freshDatabase(), PUBLIC_URL: origin, INTERNAL_SECRET: 'x'.repeat(32), LOG_LEVEL: process.env['TEST_LOG'] ?? 'silent', NODE_ENV: 'test' });
     const db = database();
     const rooms = inProcessRooms(db);
     replaceRooms(rooms);
