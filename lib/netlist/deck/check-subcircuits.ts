@@ -1,8 +1,9 @@
 import type { DeckElement, Subcircuit } from '../netlist';
-import type { FactLine } from './deck-document';
+import type { DeckDocument } from './deck-document';
 import { deckLimits } from './deck-limits';
 import { DeckRefusal } from './deck-refusal';
-import { kindOfWord } from './kind-word';
+import { namedFacts } from './element-facts';
+import { elementKind } from './element-kind';
 import { nameKey } from './names';
 
 /** Subcircuits in reach, by lower-case name. */
@@ -12,11 +13,12 @@ type Reach = ReadonlyMap<string, { readonly subcircuit: Subcircuit; readonly rea
  * Throws `DeckRefusal` when a call names no subcircuit or has a wrong number of nodes, when subcircuits call each other in a ring or
  * too deep, or when the parts are too many once all are expanded. An X that a fact line makes one part needs none.
  */
-export function checkSubcircuits(elements: readonly DeckElement[], subcircuits: readonly Subcircuit[], factLines: readonly FactLine[]): void {
-  const parts = new Set(factLines.filter(({ facts }) => kindOfWord(facts.kind)).map(({ name }) => nameKey(name)));
-  const whole = elements.filter((element) => element.letter === 'X' && parts.has(nameKey(element.name)));
-  const calls = elements.filter((element) => !whole.includes(element));
-  const total = whole.length + expansion(calls, reachOf(subcircuits, new Map()), new Map(), []).parts;
+export function checkSubcircuits(document: DeckDocument): void {
+  const facts = namedFacts(document).elements;
+  const isWhole = (element: DeckElement) => element.letter === 'X' && elementKind(element, facts.get(nameKey(element.name)) ?? {}, undefined) !== 'box';
+  const calls = document.elements.filter((element) => !isWhole(element));
+  const inside = expansion(calls, reachOf(document.subcircuits, new Map()), new Map(), []);
+  const total = document.elements.length - calls.length + inside.parts;
   if (total > deckLimits.parts) throw new DeckRefusal(1, `The deck has ${total} parts with its subcircuits expanded; at most ${deckLimits.parts} are checked.`);
 }
 

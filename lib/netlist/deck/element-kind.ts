@@ -7,8 +7,16 @@ import { kindOfWord } from './kind-word';
 
 type ReadFacts = Readonly<Record<string, FactValue>>;
 
-/** Elements that a fact line may make a part of another kind than their letter says, by the pins they have. */
-const freeKinds: Readonly<Record<string, number>> = { R: 2, C: 2, L: 2, D: 2, V: 2, Q: 3, M: 3, X: Infinity };
+/** Kinds that a fact line may make of an element, by its letter; of an X any that has no more pins than it has nodes. */
+const kindsOfLetter: Readonly<Record<string, readonly KindId[]>> = {
+  R: ['resistor', 'removable-lead', 'plug-contact', 'switch', 'fuse'],
+  C: ['capacitor', 'polarised-capacitor'],
+  L: ['inductor', 'air-core-coil'],
+  D: ['diode', 'schottky', 'zener', 'led'],
+  V: ['dc-source', 'dc-supply', 'signal-generator', 'ac-mains'],
+  Q: ['npn', 'pnp'],
+  M: ['nmos', 'pmos'],
+};
 
 /**
  * Which kind of part an element is: the `kind=` of its fact line where it fits the element, else what its other facts, its
@@ -16,19 +24,21 @@ const freeKinds: Readonly<Record<string, number>> = { R: 2, C: 2, L: 2, D: 2, V:
  */
 export function elementKind(element: DeckElement, facts: ReadFacts, card: ModelCard | undefined): KindId {
   if (!isExamined(element) || element.letter === 'I') return 'box';
+  const type = card && modelPolarity(card);
   const stated = kindOfWord(facts.kind);
-  if (stated && fits(stated, element)) return stated;
+  if (stated && fits(stated, element, type)) return stated;
   if (element.letter === 'V') return sourceKind(element, facts);
   if (element.letter === 'C' && isPolarised(facts)) return 'polarised-capacitor';
   if (element.letter === 'D' && typeof facts.vz === 'number') return 'zener';
-  const type = card && modelPolarity(card);
   return kindIds.find((id) => kindOf(id).deck.read?.(element, type)) ?? 'box';
 }
 
-/** A kind fits when the element has a node for each of its pins. */
-function fits(kind: KindId, element: DeckElement): boolean {
-  const pins = kindOf(kind).pins.length;
-  return pins >= 2 && pins <= element.nodes.length && pins <= (freeKinds[element.letter] ?? 0);
+/** Whether an element can be of a kind; the polarity of a transistor's own card is not argued with. */
+function fits(kind: KindId, element: DeckElement, type: string | undefined): boolean {
+  const { length } = kindOf(kind).pins;
+  if (element.letter === 'X') return length >= 2 && length <= element.nodes.length;
+  if (type !== undefined && 'MQ'.includes(element.letter) && type !== kind) return false;
+  return kindsOfLetter[element.letter]?.includes(kind) ?? false;
 }
 
 function sourceKind(element: DeckElement, facts: ReadFacts): KindId {

@@ -33,7 +33,7 @@ describe('kinds', () => {
     ['removable-lead', ['R1 a b 10m', '*@R1 kind=lead']], ['fuse', ['R1 a b 10m', '*@R1 kind=fuse value=2']], ['switch', ['R1 a b 1m', '*@R1 kind=switch']],
     ['resistor', ['R1 a b 12', '*@R1 kind=lamp']], ['resistor', ['R1 a b 5m', '*@R1 wire=yes']],
     ['box', ['I1 a b 1m']], ['box', ['X1 a b c FET', ...power]], ['box', ['E1 a b c d 2']], ['box', ['Q1 c b e NOCARD']], ['box', ['X1 a b c FET', '*@X1 kind=driver', ...power]],
-    ['resistor', ['R1 a b 1k', '*@R1 kind=NMOS']],
+    ['resistor', ['R1 a b 1k', '*@R1 kind=NMOS']], ['npn', ['Q1 c b e QQ', '*@Q1 kind=PNP', '.model QQ NPN']],
   ])('%s from %j', (kind, lines) => {
     expect(part(...lines).kind).toBe(kind);
   });
@@ -96,6 +96,12 @@ describe('models', () => {
   test('a bulk elsewhere than at the source is told', () => {
     expect(from('M1 d g s 0 MM', '.model MM NMOS').notices.map(({ text }) => text)).toEqual(['M1: its bulk is taken as joined to its source.']);
   });
+});
+
+test('a kind that does not fit its element is told and kept as words', () => {
+  const { netlist, notices } = from('R1 a b 1k', '*@R1 kind=NMOS');
+  expect(netlist.parts[0]?.facts.kind).toBe('nmos');
+  expect(notices).toEqual([{ line: 2, text: 'R1: kind=NMOS does not fit this element; it is kept as words and no rule uses it.' }]);
 });
 
 test('values and levels', () => {

@@ -1,8 +1,9 @@
 import { sortedByKey } from '../connectivity/sorted-by-key';
+import type { KindId } from '../kinds/kind-id';
 import { compareNetNames } from '../connectivity/drawn-nets';
 import { pinReference } from '../connectivity/pin-reference';
 import { compareDesignators } from '../designators/designator';
-import { canonicalKindWord } from './kind-word';
+import { canonicalKindWord, kindOfWord } from './kind-word';
 import type { DeckElement, Facts, FactValue, ModelCard, Net, Netlist, NetlistPart } from '../netlist';
 import type { DeckDocument, DeckNotice } from './deck-document';
 import { namedFacts, type NamedFacts } from './element-facts';
@@ -13,6 +14,8 @@ import { libraryOf } from './library';
 import { nameKey, nodeKey } from './names';
 import { withoutRestated } from './new-in-deck';
 import { nodeNames } from './node-names';
+
+type ReadFacts = Readonly<Record<string, FactValue>>;
 
 export interface DeckNetlist {
   readonly netlist: Netlist;
@@ -47,15 +50,19 @@ function partOf(element: DeckElement, document: DeckDocument, named: NamedFacts,
   const card = element.model === undefined ? undefined : findByName(document.models, element.model);
   const kind = elementKind(element, facts, card);
   const subcircuit = element.letter === 'X' ? findByName(document.subcircuits, element.model as string) : undefined;
-  tell(element, kind, card, notices);
+  tell(element, kind, facts, card, notices);
   if (kind === 'box') return elementPart(element, kind, facts, boxPins(element, subcircuit));
   const { model, ...bare } = element;
   const known: DeckElement = card && model !== undefined ? element : bare;
   return withoutRestated(elementPart(known, kind, facts, elementPins(element, kind, facts, subcircuit)), element, card);
 }
 
-function tell(element: DeckElement, kind: string, card: ModelCard | undefined, notices: DeckNotice[]): void {
+function tell(element: DeckElement, kind: KindId, facts: ReadFacts, card: ModelCard | undefined, notices: DeckNotice[]): void {
   const { line, name } = element;
+  const stated = kindOfWord(facts.kind);
+  if (stated && stated !== kind) {
+    notices.push({ line, text: `${name}: kind=${String(facts.kind)} does not fit this element; it is kept as words and no rule uses it.` });
+  }
   if ('DMQRCL'.includes(element.letter) && element.model !== undefined && !card) {
     notices.push({ line, text: `${name}: the deck has no model ${element.model}${kind === 'box' ? '; it stands as a box, not examined' : '; its facts are used'}.` });
   }

@@ -1,4 +1,4 @@
-import type { DeckError, DeckReading } from './deck-document';
+import type { DeckDocument, DeckError, DeckReading } from './deck-document';
 import { deckLines } from './deck-lines';
 import { DeckRefusal } from './deck-refusal';
 import { readFactLine } from './read-fact-line';
@@ -43,14 +43,12 @@ function read(text: string): DeckReading {
   if (errors.length > 0) return { ok: false, errors: errors.sort((a, b) => a.line - b.line).slice(0, maxErrors) };
   const { elements, models, subcircuits } = reader.root.subcircuit();
   const factLines = facts.flatMap((line) => readFactLine(line, reader.notices) ?? []);
-  checkSubcircuits(elements, subcircuits, factLines);
-  return {
-    ok: true,
-    document: {
-      title, elements, models, subcircuits, factLines,
-      params: Object.fromEntries(reader.params), options: reader.options,
-      ...(reader.temp === undefined ? {} : { temp: reader.temp }),
-      notices: reader.notices.sort((a, b) => a.line - b.line),
-    },
+  const document: DeckDocument = {
+    title, elements, models, subcircuits, factLines,
+    params: Object.fromEntries(reader.params), options: reader.options,
+    ...(reader.temp === undefined ? {} : { temp: reader.temp }),
+    notices: reader.notices.sort((a, b) => a.line - b.line),
   };
+  checkSubcircuits(document);
+  return { ok: true, document };
 }

@@ -81,15 +81,16 @@ function passive(name: string, words: readonly Token[], { numbers, notices }: El
   return { nodes: ends, model: third.text, ...(fourth ? { value: numbers.read(fourth, line) } : {}) };
 }
 
-/** Nodes, a model, then at most an area and OFF. */
+/** Nodes, a model, then at most OFF and, but for M, an area. */
 function withModel(name: string, words: readonly Token[], count: number, { numbers }: ElementContext, line: number): Body {
+  const letter = name.charAt(0).toUpperCase();
   const found = nodes(name, words, count, line);
   const [model, ...rest] = words.slice(count);
   if (model?.kind !== 'word') throw new DeckRefusal(line, `${name} has too few nodes or no model: it takes ${count} nodes and a model.`);
   const [area, extra] = rest.filter((token) => token.text.toLowerCase() !== 'off');
   if (extra) throw new DeckRefusal(line, `${name}: ${extra.text} is not understood after its model ${model.text}.`);
   if (!area) return { nodes: found, model: model.text };
-  const number = numbers.tryRead(area, line);
+  const number = letter === 'M' ? undefined : numbers.tryRead(area, line);
   if (number === undefined) throw new DeckRefusal(line, `${name}: ${area.text} is not understood after its model ${model.text}.`);
   return { nodes: found, model: model.text, area: number };
 }
