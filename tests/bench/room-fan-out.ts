@@ -1,17 +1,19 @@
 import { randomBytes } from 'node:crypto';
-import { WebSocket } from 'ws';
+import { setTimeout as pause } from 'node:timers/promises';
+import type { WebSocket } from 'ws';
 import { openDatabase } from '@/db/client';
 import { issueRoomTicket } from '@/db/mutations/room-ticket';
 import type { RoomActor } from '@/db/queries/room-grant';
-import { FrameSocket } from '@/realtime/testing/frame-socket';
+import { protocolVersion, schemaVersion, subprotocol } from '@/realtime/limits';
+import { encodeFrame, frameBytes } from '@/realtime/protocol';
 import { SheetCopy } from '@/realtime/testing/sheet-copy';
 import { anyFreePort } from '../../scripts/machine/free-port.mjs';
 import { startTemporaryServer } from '../../scripts/mariadb/temporary-server.mjs';
 import { addSheetPeople } from '../realtime/support/people-of-the-sheet';
 import { makeDatabase } from '../realtime/support/sheet-world';
 import { childServer } from './support/child-server';
+import { CountingClients, openSocket } from './support/counting-clients';
 import { figure, quantile, report } from './support/figures';
-import { until } from './support/until';
 
 /**
  * An edit shown to 20 other clients, commit to disk included, beside a relay that stores nothing: both servers are
@@ -20,6 +22,8 @@ import { until } from './support/until';
 const others = 20;
 const rounds = 150;
 const warmUp = 20;
+/** 15 edits a second, as people drag: above 20 a second a room gathers changes for 16 ms. */
+const paceMs = 66;
 const origin = 'http://127.0.0.1:3000';
 
 const mariadb = await startTemporaryServer({ durable: true });
@@ -32,43 +36,43 @@ const realtime = await childServer(['--import', 'tsx', 'realtime/server/main.ts'
 });
 const relay = await childServer(['tests/bench/support/plain-relay.mjs']);
 
-async function enter(actor: RoomActor, clientIds: readonly number[]): Promise<FrameSocket> {
+async function enter(actor: RoomActor, clientIds: readonly number[]): Promise<WebSocket> {
   const issued = await issueRoomTicket(connection.db, people.circuitId, actor);
   if (!issued) throw new Error('No ticket.');
-  const socket = await new FrameSocket(`ws://127.0.0.1:${port}/sheet/${people.circuitId}`, { origin }).opened();
-  socket.hello(issued.ticket, { instance: randomBytes(16).toString('base64url'), clientIds });
-  await socket.next('welcome');
+  const socket = await openSocket(`ws://127.0.0.1:${port}/sheet/${people.circuitId}`, [subprotocol], origin);
+  const welcome = new Promise((resolve) => socket.once('message', resolve));
+  socket.send(encodeFrame({
+    kind: 'hello', ticket: issued.ticket, protocol: protocolVersion, schema: schemaVersion, instance: randomBytes(16).toString('base64url'), clientIds,
+    stateVector: Uint8Array.of(0), lastAcked: 0, resume: { hash: '', parts: 0 },
+  }));
+  await welcome;
   return socket;
-}
-
-async function relayClient(): Promise<{ readonly socket: WebSocket; readonly count: () => number }> {
-  const socket = new WebSocket(`ws://127.0.0.1:${relay.firstLine}`, { perMessageDeflate: false });
-  let count = 0;
-  socket.on('message', () => { count += 1; });
-  await new Promise((resolve) => socket.once('open', resolve));
-  return { socket, count: () => count };
 }
 
 const copy = new SheetCopy();
 const author = await enter(people.maker, [copy.clientId]);
-copy.receive(await author.whole());
-const readers = await Promise.all(Array.from({ length: others }, () => enter(people.member, [])));
-const relayAuthor = await relayClient();
-const relayReaders = await Promise.all(Array.from({ length: others }, relayClient));
+const readers = new CountingClients(
+  await Promise.all(Array.from({ length: others }, () => enter(people.member, []))), (firstByte) => firstByte === frameBytes.change,
+);
+const relayAddress = `ws://127.0.0.1:${relay.firstLine}`;
+const relayAuthor = await openSocket(relayAddress);
+const relayReaders = new CountingClients(await Promise.all(Array.from({ length: others }, () => openSocket(relayAddress))));
 
 const [committed, relayed]: [number[], number[]] = [[], []];
 for (let round = 1; round <= warmUp + rounds; round += 1) {
   // A drawn sheet does not grow with every edit: parts are placed once, then moved.
   const bytes = round <= 30 ? copy.addResistor(`R${round}`) : copy.move(`R${(round % 30) + 1}`, 20 * (round % 400));
   const started = performance.now();
-  author.send({ kind: 'edit', clientSeq: round, bytes });
-  await until('everybody to see the edit', () => readers.every((reader) => reader.of('change').length >= round));
+  author.send(encodeFrame({ kind: 'edit', clientSeq: round, bytes }));
+  await readers.all(round);
   const seen = performance.now();
-  relayAuthor.socket.send(bytes);
-  await until('everybody to get the frame', () => relayReaders.every((reader) => reader.count() >= round));
+  relayAuthor.send(bytes);
+  await relayReaders.all(round);
+  const ended = performance.now();
+  await pause(paceMs);
   if (round <= warmUp) continue;
   committed.push(seen - started);
-  relayed.push(performance.now() - seen);
+  relayed.push(ended - seen);
 }
 
 report([
@@ -77,8 +81,9 @@ report([
   figure('ratio of medians, room to relay', [quantile(committed, 0.5) / quantile(relayed, 0.5)], '×', { atMost: 3 }),
 ]);
 
-for (const socket of [author, ...readers]) socket.cut();
-for (const { socket } of [relayAuthor, ...relayReaders]) socket.terminate();
+for (const socket of [author, relayAuthor]) socket.terminate();
+readers.close();
+relayReaders.close();
 await Promise.all([realtime.stop(), relay.stop()]);
 await connection.close();
 await mariadb.stop();
