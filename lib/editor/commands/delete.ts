@@ -1,0 +1,8 @@
+import { deleteItems } from '../edits/delete-items';
+import { hasSelection, type Command } from './command';
+
+export const deleteSelection: Command = {
+  name: 'delete', title: 'Delete', group: 'Edit', keys: ['Delete', 'Backspace'], edits: true,
+  when: hasSelection,
+  perform: ({ state }) => ({ sheet: deleteItems(state.sheet, state.selection), selection: new Set() }),
+};

@@ -1,0 +1,34 @@
+import { pinEnd } from '@/lib/netlist/connectivity/end-key';
+import { drawnNets, type DrawnNet } from '@/lib/document/nets/drawn-net';
+import { sheetToNetlist } from '@/lib/document/nets/sheet-to-netlist';
+import type { Sheet } from '@/lib/document/records';
+
+const cache = new WeakMap<Sheet, readonly (string | undefined)[]>();
+
+/** Netlist name of each drawn net, in the order of `drawnNets`; undefined for lines without a part. */
+export function drawnNetNames(sheet: Sheet): readonly (string | undefined)[] {
+  const known = cache.get(sheet) ?? namesOf(sheet);
+  cache.set(sheet, known);
+  return known;
+}
+
+function namesOf(sheet: Sheet): readonly (string | undefined)[] {
+  const names = new Map<string, string>();
+  for (const part of sheetToNetlist(sheet).parts) for (const [pin, net] of Object.entries(part.pins)) names.set(pinEnd(part.id, pin), net);
+  const parts = new Map(sheet.parts.map((part) => [part.id, part]));
+  return drawnNets(sheet).map((net) => {
+    for (const pin of net.pins) {
+      const name = names.get(pinEnd(pin.part, pin.pin));
+      if (name !== undefined) return name;
+    }
+    const mark = net.pins.map((pin) => parts.get(pin.part)).find((part) => part?.kind === 'zero-volt' || part?.kind === 'net-name');
+    if (mark?.kind === 'zero-volt') return '0';
+    return typeof mark?.facts.name === 'string' ? mark.facts.name.trim() : undefined;
+  });
+}
+
+/** Drawn nets that are the net of this name, with their place in `drawnNets`. */
+export function drawnNetsNamed(sheet: Sheet, name: string): readonly { readonly number: number; readonly net: DrawnNet }[] {
+  const names = drawnNetNames(sheet);
+  return drawnNets(sheet).flatMap((net, number) => (names[number] === name ? [{ number, net }] : []));
+}
