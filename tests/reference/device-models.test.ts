@@ -2,11 +2,12 @@ import { describe, expect, it } from 'vitest';
 import { diodeCard } from '@/lib/netlist/models/diode-model';
 import { fitBipolar } from '@/lib/netlist/models/bipolar-model';
 import { fitOnePoint, fitTwoPoints, type JunctionFit } from '@/lib/netlist/models/junction-fit';
+import { ledModel } from '@/lib/netlist/models/led-model';
 import { modelLine } from '@/lib/netlist/models/model-line';
 import { fitZener } from '@/lib/netlist/models/zener-model';
-import { percentOff, roomTemperature, useReferenceEngine } from './support/reference-engine';
+import { percentOff, roomTemperature, referenceEngine } from './support/reference-engine';
 
-const engine = useReferenceEngine();
+const engine = referenceEngine();
 
 describe('junctions of docs/engine.md 3.2 carry their sheet points in the engine, within 0.01 %', () => {
   const parts: readonly (readonly [string, JunctionFit, readonly (readonly [number, number])[]])[] = [
@@ -27,6 +28,13 @@ describe('junctions of docs/engine.md 3.2 carry their sheet points in the engine
     );
     expect(percentOff(values['v(a)'] ?? 0, volts)).toBeLessThan(0.01);
   });
+});
+
+it.each(['infrared', 'red', 'green', 'white'])('a %s LED loses 2 mV/K when the ambient rises (common practice, no source)', async (colour) => {
+  const at = async (celsius: number): Promise<number> => (await engine.point(
+    [`.options temp=${celsius} tnom=25 reltol=1e-5`, 'I1 0 a 20m', 'D1 a 0 DL', modelLine('DL', ledModel({ colour }).card)], ['v(a)'],
+  ))['v(a)'] ?? 0;
+  expect(((await at(35)) - (await at(25))) / 10).toBeCloseTo(-2e-3, 3);
 });
 
 describe('zeners of docs/engine.md 3.2 in the engine', () => {

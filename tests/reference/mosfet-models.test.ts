@@ -3,10 +3,10 @@ import { fitChannel, channelVolts, subthreshold, type ChannelFit } from '@/lib/n
 import { fitCharge } from '@/lib/netlist/models/mosfet-charge';
 import { thermalVoltage } from '@/lib/netlist/models/fitted-model';
 import { modelLine } from '@/lib/netlist/models/model-line';
-import { percentOff, roomTemperature, useReferenceEngine } from './support/reference-engine';
+import { percentOff, roomTemperature, referenceEngine } from './support/reference-engine';
 import { crossing } from './support/waveform';
 
-const engine = useReferenceEngine();
+const engine = referenceEngine();
 
 /** Fit targets of docs/engine.md 3.1. `gfsOff` is the error that the table states where KP had to be raised. */
 interface MosfetSheet {

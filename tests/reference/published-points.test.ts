@@ -5,10 +5,10 @@ import type { ModelResult } from '@/lib/netlist/models/fitted-model';
 import { modelLine } from '@/lib/netlist/models/model-line';
 import { mosfetModel } from '@/lib/netlist/models/mosfet-model';
 import { zenerModel } from '@/lib/netlist/models/zener-model';
-import { percentOff, roomTemperature, useReferenceEngine } from './support/reference-engine';
+import { percentOff, roomTemperature, referenceEngine } from './support/reference-engine';
 
 /** Values of docs/sources.md that are operating points. Section, source and mark stand in each title. */
-const engine = useReferenceEngine();
+const engine = referenceEngine();
 
 function cardOf(result: ModelResult): Omit<ModelCard, 'name'> {
   if ('missing' in result) throw new Error(`missing ${result.missing}`);

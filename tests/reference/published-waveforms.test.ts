@@ -1,9 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import { percentOff, useReferenceEngine } from './support/reference-engine';
+import { percentOff, referenceEngine } from './support/reference-engine';
 import { crossing, rangeFrom } from './support/waveform';
 
 /** Values of docs/sources.md over time and frequency. Section, source and mark stand in each title. */
-const engine = useReferenceEngine();
+const engine = referenceEngine();
 /** Near enough to an ideal diode: 1 mV at an ampere. */
 const idealDiode = '.model DI D(IS=1e-12 N=0.001)';
 

@@ -6,10 +6,10 @@ import { fitChannel } from '@/lib/netlist/models/mosfet-channel';
 import { modelLine } from '@/lib/netlist/models/model-line';
 import { fitZener } from '@/lib/netlist/models/zener-model';
 import { nativePlot, nativePoint } from './support/native-ngspice';
-import { percentOff, roomTemperature, useReferenceEngine } from './support/reference-engine';
+import { percentOff, roomTemperature, referenceEngine } from './support/reference-engine';
 import { crossing, rangeFrom, valueAt, type Waveform } from './support/waveform';
 
-const engine = useReferenceEngine();
+const engine = referenceEngine();
 
 /** The same transient in Debian's ngspice. */
 function nativeWaveform(lines: readonly string[], vector: string): Waveform {

@@ -14,7 +14,7 @@ export interface ReferenceEngine {
 }
 
 /** One guarded engine for a test file. */
-export function useReferenceEngine(): ReferenceEngine {
+export function referenceEngine(): ReferenceEngine {
   const engine = createNodeEngine();
   beforeAll(() => engine.warm());
   afterAll(() => engine.dispose());
