@@ -44,11 +44,12 @@ function addValue(facts: MutableFacts, element: DeckElement, kind: KindId): void
   const isMissing = facts.value === missingValue;
   if (kind === 'box') {
     facts.element = element.letter;
-    if (!isExamined(element)) facts.text = element.text || undefined;
+    facts.text = isExamined(element) ? undefined : element.text || undefined;
     facts.value = element.value;
   } else if (kindOf(kind).deck.placeholder !== undefined) {
     facts.value = isMissing ? undefined : (element.value ?? facts.value);
   } else if (element.letter === 'R') addContact(facts, element.value, kind);
+  if (kind === 'switch') facts.closed_switch ??= false;
 }
 
 /** Ohms of an element that is a lead, contact, switch or fuse: its own resistance, and for a switch whether it is drawn closed. */

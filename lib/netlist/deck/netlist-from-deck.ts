@@ -47,7 +47,7 @@ export function netlistFromDeck(document: DeckDocument): DeckNetlist {
 
 function partOf(element: DeckElement, document: DeckDocument, named: NamedFacts, notices: DeckNotice[]): Omit<NetlistPart, 'id'> {
   const facts = named.elements.get(nameKey(element.name)) ?? {};
-  const card = element.model === undefined ? undefined : findByName(document.models, element.model);
+  const card = cardOf(element, document.models);
   const kind = elementKind(element, facts, card);
   const subcircuit = element.letter === 'X' ? findByName(document.subcircuits, element.model as string) : undefined;
   tell(element, kind, facts, card, notices);
@@ -64,11 +64,21 @@ function tell(element: DeckElement, kind: KindId, facts: ReadFacts, card: ModelC
     notices.push({ line, text: `${name}: kind=${String(facts.kind)} does not fit this element; it is kept as words and no rule uses it.` });
   }
   if ('DMQRCL'.includes(element.letter) && element.model !== undefined && !card) {
-    notices.push({ line, text: `${name}: the deck has no model ${element.model}${kind === 'box' ? '; it stands as a box, not examined' : '; its facts are used'}.` });
+    notices.push({ line, text: `${name}: the deck has no model ${element.model} for it${kind === 'box' ? '; it stands as a box, not examined' : '; its facts are used'}.` });
   }
   if (element.letter === 'M' && kind !== 'box' && element.nodes[3] !== undefined && nodeKey(element.nodes[3]) !== nodeKey(element.nodes[2] as string)) {
     notices.push({ line, text: `${name}: its bulk is taken as joined to its source.` });
   }
+}
+
+/** Types of card that an element can have. */
+const cardTypes: Readonly<Record<string, readonly string[]>> = {
+  R: ['r'], C: ['c'], L: ['l'], D: ['d'], Q: ['npn', 'pnp'], M: ['nmos', 'pmos', 'vdmos'],
+};
+
+function cardOf({ letter, model }: DeckElement, models: readonly ModelCard[]): ModelCard | undefined {
+  const card = model === undefined ? undefined : findByName(models, model);
+  return card && cardTypes[letter]?.includes(card.type) ? card : undefined;
 }
 
 function findByName<T extends { readonly name: string }>(items: readonly T[], name: string): T | undefined {

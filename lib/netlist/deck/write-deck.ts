@@ -57,6 +57,7 @@ function partFacts(
     ref: name === part.ref ? undefined : part.ref,
     pins: deck.letterOf(part) === 'X' && !isBox ? pinsFact(part, node) : undefined,
     ...withoutKind(facts),
+    polarised: part.kind === 'polarised-capacitor' && part.facts.kind !== undefined ? true : facts.polarised,
     ...(part.kind === 'plug-contact' ? { part_of: part.facts.part_of ?? part.ref } : {}),
   };
 }
