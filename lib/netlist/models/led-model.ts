@@ -30,7 +30,7 @@ const usualTestCurrent = 20e-3;
 /** A green LED above this is InGaN, volts: GaP ends below, InGaN starts above (sources.md 7). */
 const greenDivide = 2.6;
 /**
- * Band gap above the forward voltage, eV, which makes an LED lose 2 mV/K: dV/dT = (V − EG)/T − 3·k/q of the diode law
+ * Band gap above the junction's volts, eV, which makes an LED lose 2 mV/K: dV/dT = (V − EG)/T − 3·k/q of the diode law
  * with XTI 3. Common practice, no source.
  */
 const gapAboveVolts = 0.52;
@@ -47,7 +47,8 @@ export function ledModel(facts: Facts): FittedModel {
   if (test === undefined) assumed.push({ fact: 'i_test', words: `not given: ${amps * 1e3} mA` });
 
   const volts = stated ?? type.vf;
-  return { card: diodeCard(fitOnePoint({ volts, amps }, type.n, type.rs), volts + gapAboveVolts), assumed };
+  const fit = fitOnePoint({ volts, amps }, type.n, type.rs);
+  return { card: diodeCard(fit, volts - amps * fit.rs + gapAboveVolts), assumed };
 }
 
 function ledType(facts: Facts, stated: number | undefined, assumed: Assumption[]): LedType {
