@@ -49,6 +49,7 @@ export class RoomRegistry {
 
   /** Lets an empty room go after a while. */
   release(roomId: string): void {
+    if (this.stopped) return;
     clearTimeout(this.unloads.get(roomId));
     this.unloads.set(roomId, setTimeout(() => void this.unload(roomId), this.context.timing.unloadIdle));
   }
