@@ -95,6 +95,11 @@ export class ReadingGeometry implements SheetGeometry {
     return () => this.listeners.delete(listener);
   }
 
+  spotInView(): Point {
+    const { x, y, scale } = this.view;
+    return { x: Math.round(x + this.extent.width / scale / 2), y: Math.round(y + this.extent.height / scale / 2) };
+  }
+
   reveal(anchor: MarginAnchor): void {
     const [end] = find(this.sheet, anchor)?.ends ?? [];
     if (end) this.onReveal(end);

@@ -40,6 +40,8 @@ export interface SheetGeometry {
   size(): { readonly width: number; readonly height: number };
   /** Called after each frame that moved something: pan, zoom, drag, edit, resize. Returns how to stop. */
   subscribe(listener: () => void): () => void;
+  /** Sheet units of a free spot in the middle of the view, where a new note may stand. */
+  spotInView(): Place;
   /** Brings what is anchored into view. */
   reveal(anchor: MarginAnchor): void;
 }

@@ -30,7 +30,7 @@ import { revisionWords, shortHash } from './revision-words';
 import { useRevisionSheet } from './use-revision-sheet';
 
 /** One revision: its drawing, the findings stored at its cut, the circuit's notes, and how far it is signed. */
-export function RevisionPage({ letter }: { readonly letter: string }) {
+export function RevisionPage({ letter, tab = 'revisions' }: { readonly letter: string; readonly tab?: 'sheet' | 'revisions' }) {
   const { circuitId, person } = useCircuitPlace();
   const may = useMay();
   const circuit = useCircuit(circuitId);
@@ -64,7 +64,7 @@ export function RevisionPage({ letter }: { readonly letter: string }) {
     <CircuitFrame
       title={circuit.data.title}
       under={`Revision ${letter}, ${revisionWords(revision, now).toLowerCase()}`}
-      tab="revisions"
+      tab={tab}
       letters={revisions.data.map((one) => one.letter)}
       back={{ href: `/circuits/${circuitId}/revisions`, words: 'Back to the revisions' }}
       ladder={<ReadingRow revisions={revisions.data} revision={revision} shown={shown} onShow={show} flags={stopFlags(entries, revision.holdPoints)} act={<RevisionAct revision={revision} />} />}

@@ -7,6 +7,7 @@ import { LadderRow } from '@/components/circuit/ladder-row';
 import { CircuitLoading } from '@/components/circuit/page-state';
 import { RevisionBlock } from '@/components/circuit/revision-block';
 import { signedState } from '@/components/circuit/signed-state';
+import { draftWords } from '@/components/circuit/draft-words';
 import { useCircuit, useRevisions } from '@/components/circuit/use-circuit';
 import { useShownAt } from '@/components/circuit/use-shown-at';
 import { ladderPoints, touchSafeVolts } from '@/components/ladder/ladder-point';
@@ -37,7 +38,7 @@ export function RevisionsPage() {
   const moved = newest !== undefined && draft;
   const letter = nextRevisionLetter(newest?.letter ?? null);
   const objections = newest?.objections ?? [];
-  const under = newest ? moved ? `Draft after ${newest.letter}` : `As ${newest.letter}, unchanged` : 'Draft, no revision yet';
+  const under = draftWords(newest, moved);
   const volts = holdPoints.find((point) => point.name === shown)?.volts ?? 0;
   return (
     <CircuitFrame

@@ -1,0 +1,52 @@
+'use client';
+import type { MarginEntry } from '@/components/margin/margin-entry';
+import { voltsWords } from '@/components/ladder/plan-words';
+import { StatusStrip } from '@/components/shell/status-strip';
+import { Icon } from '@/components/ui/icon';
+import { Moment } from '@/components/ui/moment';
+import type { LiveFindings } from '@/lib/check/live-checker';
+import type { SheetSession, SheetSnapshot } from '@/realtime/client/sheet-session';
+import { saveLamp, SaveWords } from './save-state';
+
+/** What was checked, and when: '41 checks on the draft, 18:52'. */
+export function CheckedWords({ live }: { readonly live: LiveFindings | null }) {
+  if (!live) return <>checking</>;
+  const ran = live.findings.filter((finding) => finding.outcome !== 'not applicable').length;
+  return <>{ran} checks on the draft, {live.state === 'topology' ? 'numbers running' : live.state === 'failed' ? 'the engine did not answer' : <Moment at={new Date(live.at).toISOString()} />}</>;
+}
+
+interface SheetStatusProps {
+  readonly session: SheetSession | null;
+  readonly snapshot: SheetSnapshot | null;
+  readonly live: LiveFindings | null;
+  readonly entries: readonly MarginEntry[];
+  readonly plan: readonly { readonly name: string; readonly volts: number }[];
+  readonly message: string | null;
+  readonly readOnly: boolean;
+}
+
+/** The foot of the sheet page: how far it is blocked, what the editor says, and the save mark. */
+export function SheetStatus({ session, snapshot, live, entries, plan, message, readOnly }: SheetStatusProps) {
+  const stop = entries.find((entry) => entry.kind === 'stop');
+  const at = stop?.kind === 'stop' ? plan.find((point) => point.name === stop.finding.holdPoint) ?? plan[0] : undefined;
+  const state = !live ? 'Checking' : stop ? at ? `Blocked at ${voltsWords(at.volts)}` : 'A stop is open' : 'Within limits';
+  const lamp = saveLamp(snapshot);
+  const others = snapshot?.others.length ?? 0;
+  return (
+    <StatusStrip
+      lamp={!live ? 'working' : stop ? 'stop' : 'ok'}
+      state={state}
+      notes={[
+        readOnly && snapshot?.loaded ? <span className="inline-flex items-center gap-1.5"><Icon name="lock" className="size-3" />{snapshot.room.state === 'quarantined' ? snapshot.room.why : 'Read only for you'}</span> : null,
+        message,
+        others === 0 ? 'Only you are here' : `${others + 1} people on the sheet`,
+      ]}
+      right={
+        <span className="flex items-center gap-3" role="status">
+          {lamp === 'stop' || lamp === 'caution' ? <button type="button" onClick={() => session?.reconnect()} className="min-h-6 text-act underline underline-offset-[3px]">Try now</button> : null}
+          <SaveWords snapshot={snapshot} />
+        </span>
+      }
+    />
+  );
+}
