@@ -53,6 +53,15 @@ function doubled(parts: readonly NetlistPart[], taken: readonly string[]): Outco
   });
 }
 
+function single(group: readonly NetlistPart[]): Outcome {
+  const { ref } = group[0]!;
+  return everywhere({
+    outcome: 'pass', severity: 'caution', target: { part: group.map((part) => part.id).sort() }, refs: [ref], nets: [],
+    message: group.length === 1 ? `${ref} names one part` : `${ref} names the contacts of one plug`,
+    evidence: [{ entity: ref, quantity: 'parts of this name', value: 1, unit: '', source: 'sheet', limit: 1, limitSource: 'a designator names one part (ASME Y14.44)' }],
+  });
+}
+
 export const designatorTwice: Rule<typeof parameters> = {
   id: 'designator-twice', version: 1, title: 'Designator given twice or missing', severity: 'caution', needs: 'topology', parameters,
   check: ({ netlist }) => {
@@ -60,7 +69,7 @@ export const designatorTwice: Rule<typeof parameters> = {
     const taken = parts.map((part) => part.ref);
     return byDesignator(parts).flatMap((group): readonly Outcome[] => {
       if (group[0]!.ref === '') return group.map((part) => nameless(part, taken));
-      return group.length > 1 && !isOnePlug(group) ? [doubled(group, taken)] : [];
+      return [group.length > 1 && !isOnePlug(group) ? doubled(group, taken) : single(group)];
     });
   },
 };

@@ -1,6 +1,7 @@
 import type { Net } from '../../netlist';
 import type { Outcome, Rule, RuleInput } from '../rule';
 import { everywhere } from '../support/outcome';
+import { netWords } from '../support/words';
 import { areAliases, areMistyped } from './likeness';
 
 const parameters = {
@@ -45,10 +46,19 @@ function judge(pair: Pair): Outcome {
     refs: refsOf(pair), nets: [fewer.name, more.name],
     message: `Nets ${left} and ${shown} are not joined, and their names look like one`,
     evidence: [
-      { entity: left, quantity: 'pins', value: fewer.pins.length, unit: '', source: 'sheet' },
-      { entity: shown, quantity: 'pins', value: more.pins.length, unit: '', source: 'sheet' },
+      { entity: `${left}, ${shown}`, quantity: 'told apart by name', value: false, unit: '', source: 'sheet' },
+      { entity: left, quantity: 'pins on the net', value: fewer.pins.length, unit: '', source: 'sheet' },
+      { entity: shown, quantity: 'pins on the net', value: more.pins.length, unit: '', source: 'sheet' },
     ],
     remedy: { words: `Give both the name ${shown}, or names that nobody takes for one.`, ...(right === '0' ? {} : { edits: [{ edit: 'rename net', from: left, to: right }] }) },
+  });
+}
+
+function clear(net: Net): Outcome {
+  return everywhere({
+    outcome: 'pass', severity: 'caution', confidence: 'likely', target: { net: [net.name] }, refs: [], nets: [net.name],
+    message: `No other net has a name like ${netWords(net.name)}`,
+    evidence: [{ entity: net.name, quantity: 'told apart by name', value: true, unit: '', source: 'sheet' }],
   });
 }
 
@@ -56,6 +66,8 @@ export const netNamesAlike: Rule<typeof parameters> = {
   id: 'net-names-alike', version: 1, title: 'Net names that look like one', severity: 'caution', needs: 'topology', parameters,
   check: (input) => {
     const named = input.netlist.nets.filter((net) => namesOf(net).length > 0);
-    return named.flatMap((a, index) => named.slice(index + 1).flatMap((b) => alike(input, [a, b]))).map(judge);
+    const pairs = named.flatMap((a, index) => named.slice(index + 1).flatMap((b) => alike(input, [a, b])));
+    const doubtful = new Set(pairs.flatMap(({ fewer, more }) => [fewer, more]));
+    return [...pairs.map(judge), ...named.filter((net) => !doubtful.has(net)).map(clear)];
   },
 };

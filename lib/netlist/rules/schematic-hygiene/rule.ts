@@ -26,7 +26,10 @@ function judgeValue(part: NetlistPart): readonly Outcome[] {
   if (!sold || value === undefined || value <= 0) return [];
   const base = { severity: 'advice', target: { part: [part.id], point: ['value'] }, refs: [part.ref] } as const;
   const near = sold.series.map((series) => nearest(value, series)).sort((a, b) => Math.abs(a - value) - Math.abs(b - value))[0]!;
-  const evidence = [{ entity: part.ref, quantity: 'value', value, unit: sold.unit, source: part.origins.value ?? 'typed', limit: near, limitSource: source }];
+  const evidence = [
+    { entity: part.ref, quantity: 'value', value, unit: sold.unit, source: part.origins.value ?? 'typed' },
+    { entity: part.ref, quantity: 'distance from the E-series', value: Math.abs(value / near - 1), unit: '', source: `nearest is ${say(near, sold.unit)}`, limit: 1e-9, limitSource: source },
+  ];
   if (sold.series.some((series) => isPreferred(value, series))) return [everywhere({ ...base, outcome: 'pass', message: `${part.ref} has a value of the E-series`, evidence })];
   return [everywhere({
     ...base, outcome: 'fail', evidence,
@@ -40,8 +43,9 @@ function judgeDesignator(part: NetlistPart, taken: readonly string[]): readonly 
   if (!accepted || part.ref === '' || isInternal(part)) return [];
   const base = { severity: 'advice', target: { part: [part.id], point: ['designator'] }, refs: [part.ref] } as const;
   const letters = splitDesignator(part.ref)?.letters.toUpperCase();
-  const evidence = [{ entity: part.ref, quantity: 'class letter', value: letters ?? '', unit: '', source: 'sheet', limitSource: 'ASME Y14.44 and everyday use' }];
-  if (letters !== undefined && accepted.includes(letters)) return [everywhere({ ...base, outcome: 'pass', message: `${part.ref} has a class letter of its kind`, evidence })];
+  const usual = letters !== undefined && accepted.includes(letters);
+  const evidence = [{ entity: part.ref, quantity: 'class letter of its kind', value: usual, unit: '', source: 'sheet', limitSource: 'ASME Y14.44 and everyday use' }];
+  if (usual) return [everywhere({ ...base, outcome: 'pass', message: `${part.ref} has a class letter of its kind`, evidence })];
   const ref = nextDesignator(accepted[0]!, taken);
   return [everywhere({
     ...base, outcome: 'fail', evidence,
