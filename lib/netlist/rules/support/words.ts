@@ -1,3 +1,4 @@
+import { isAlternating } from '../../circuit/source-role';
 import { formatQuantity } from '../../quantity/format-quantity';
 import type { RunPoint } from '../../points/point-set';
 import type { Station } from '../../points/station';
@@ -5,10 +6,10 @@ import type { Station } from '../../points/station';
 /** A number as messages print it: three significant digits, engineering notation. */
 export const say = (value: number, unit: string): string => formatQuantity(value, unit, 3);
 
-/** `at 36 V`, `at 230 V rms`, or `as drawn`. */
-export function stationWords(station: Station, alternating = false): string {
-  if (station.volts === null || (station.holdPoint === null && station.scenario === null)) return 'as drawn';
-  return `at ${say(station.volts, 'V')}${alternating ? ' rms' : ''}`;
+/** `at 36 V`, `at 230 V rms`, or `as drawn` where no power source can be told. */
+export function stationWords({ volts, power }: Station): string {
+  if (volts === null) return 'as drawn';
+  return `at ${say(volts, 'V')}${power && isAlternating(power) ? ' rms' : ''}`;
 }
 
 const levelWords = { nominal: '', '+10 %': ' +10 %', 'peak +': ' (positive peak)', 'peak -': ' (negative peak)' } as const;
