@@ -21,6 +21,8 @@ export function elementPart(element: DeckElement, kind: KindId, facts: ReadFacts
   if (kind === 'polarised-capacitor') own.polarised = undefined;
   if (kind === 'plug-contact' && own.part_of === ref) own.part_of = undefined;
   addValue(own, element, kind);
+  // Width and length mean nothing to a transistor whose model is made from its ratings.
+  const isRated = element.letter === 'M' && element.model === undefined;
   const isWhole = element.letter === 'X' && kind !== 'box';
   return {
     ref,
@@ -30,7 +32,7 @@ export function elementPart(element: DeckElement, kind: KindId, facts: ReadFacts
     origins: {},
     ...(element.wave ? { wave: element.wave } : {}),
     ...(element.model === undefined || isWhole ? {} : { model: element.model }),
-    ...(Object.keys(element.params).length > 0 ? { params: sortedByKey(element.params) } : {}),
+    ...(Object.keys(element.params).length > 0 && !isRated ? { params: sortedByKey(element.params) } : {}),
     leftOpen: [],
   };
 }
@@ -47,7 +49,8 @@ function addValue(facts: MutableFacts, element: DeckElement, kind: KindId): void
     facts.text = isExamined(element) ? undefined : element.text || undefined;
     facts.value = element.value;
   } else if (kindOf(kind).deck.placeholder !== undefined) {
-    facts.value = isMissing ? undefined : (element.value ?? facts.value);
+    const stated = typeof facts.value === 'number' ? facts.value : undefined;
+    facts.value = isMissing ? undefined : (element.value ?? stated);
   } else if (element.letter === 'R') addContact(facts, element.value, kind);
   if (kind === 'switch') facts.closed_switch ??= false;
 }

@@ -66,10 +66,10 @@ function withoutKind({ kind: _kind, ...facts }: Record<string, FactValue | undef
   return facts;
 }
 
-/** The element has the number, or a wave alone; `missing` says that nobody gave it, and words that were no number are kept. */
+/** The element has the number, or a wave alone; `missing` says that nobody gave it. */
 function writtenValue({ facts, model }: NetlistPart, element: string): FactValue | undefined {
   if (typeof facts.value === 'number' || model !== undefined) return undefined;
-  return facts.value ?? (/ (?:SIN|PULSE|EXP|PWL)\(/.test(element) ? undefined : missingValue);
+  return / (?:SIN|PULSE|EXP|PWL)\(/.test(element) ? undefined : missingValue;
 }
 
 /** `D:drain,G:gate,S:0`: nodes are plain names, so that nothing in them can be a comma or a colon. */

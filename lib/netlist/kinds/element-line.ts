@@ -50,7 +50,7 @@ export function contactDeck(isClosed: (part: NetlistPart) => boolean): KindDeck 
     pinOrder: pins,
     write(part, name, node) {
       const ohms = isClosed(part) ? (numberOf(part, 'rs') ?? closedOhms) : openOhms;
-      return [`${name} ${nodesOf(part, pins, node)} ${deckNumber(ohms)}`];
+      return [`${name} ${nodesOf(part, pins, node)} ${deckNumber(ohms)}${instanceParameters(part)}`];
     },
   };
 }
