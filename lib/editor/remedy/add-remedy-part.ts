@@ -10,7 +10,7 @@ import type { PartRecord, Sheet } from '@/lib/document/records';
 import { newPart } from '../edits/add-part';
 import type { NewId } from '../edits/edit';
 import { joinToNet } from './join-to-net';
-import { drawnNetsNamed } from './named-net';
+import { drawnNetsNamed, nameOfHeld, type HeldNet } from './named-net';
 
 type AddPart = Extract<RemedyEdit, { edit: 'add part' }>;
 
@@ -65,17 +65,20 @@ function poseFor(sheet: Sheet, part: PartRecord, pins: Readonly<Record<string, s
 }
 
 /** Adds the part of a proposed change near the pins it serves and joins it to its nets. Words when it cannot. */
-export function addRemedyPart(sheet: Sheet, edit: AddPart, newId: NewId): { readonly sheet: Sheet; readonly part: string } | { readonly refused: string } {
+export function addRemedyPart(
+  sheet: Sheet, edit: AddPart, nets: ReadonlyMap<string, HeldNet>, newId: NewId,
+): { readonly sheet: Sheet; readonly part: string } | { readonly refused: string } {
   if (!isKind(edit.kind)) return { refused: `There is no part of kind ${edit.kind}.` };
   const bare = newPart(sheet, edit.kind, { x: 0, y: 0, turn: 0, mirror: false }, newId(), edit.facts);
   const wrong = Object.keys(edit.pins).find((pin) => !pinPlaceOf(bare, pin));
   if (wrong !== undefined) return { refused: `${bare.ref} has no pin ${wrong}.` };
-  const gone = Object.values(edit.pins).find((net) => net !== '0' && drawnNetsNamed(sheet, net).length === 0);
+  const gone = Object.values(edit.pins).find((net) => !nets.has(net));
   if (gone !== undefined) return { refused: `The sheet no longer has a net ${gone}. The change was proposed for an older state.` };
+  const now = Object.fromEntries(Object.entries(edit.pins).map(([pin, net]) => [pin, nameOfHeld(sheet, nets.get(net) as HeldNet) ?? net]));
   const outlines = [...sheet.parts.map(partBoxOf), ...wireBoxes(sheet)];
-  const placed = freePlace(poseFor(sheet, bare, edit.pins), outlines, 15);
-  const nets = Object.entries(edit.pins).sort(([, a], [, b]) => Number(a === '0') - Number(b === '0'));
+  const placed = freePlace(poseFor(sheet, bare, now), outlines, 15);
+  const joins = Object.entries(edit.pins).sort(([, a], [, b]) => Number(a === '0') - Number(b === '0'));
   let current: Sheet = { ...sheet, parts: [...sheet.parts, placed] };
-  for (const [pin, net] of nets) current = joinToNet(current, { part: placed.id, pin }, net, newId);
+  for (const [pin, net] of joins) current = joinToNet(current, { part: placed.id, pin }, nets.get(net) as HeldNet, newId);
   return { sheet: current, part: placed.id };
 }

@@ -5,7 +5,8 @@ import { sheetToNetlist } from '@/lib/document/nets/sheet-to-netlist';
 import type { Sheet, WireEnd } from '@/lib/document/records';
 import { tidyWiring } from '../edits/tidy-wiring';
 import type { NewId } from '../edits/edit';
-import { joinToNet, type PinName } from './join-to-net';
+import { joinToNet } from './join-to-net';
+import { netOfPin, type PinName } from './named-net';
 
 const markKinds = new Set(['zero-volt', 'net-name']);
 
@@ -18,7 +19,6 @@ export function detachPin(sheet: Sheet, { part: partId, pin: pinName }: PinName,
   const part = index.part.get(partId);
   const place = part && pinPlaceOf(part, pinName);
   if (!place) return null;
-  const net = sheetToNetlist(sheet).parts.find((one) => one.id === partId)?.pins[pinName];
   const touching = sheet.parts.filter((other) => other.id !== partId && pinPlacesOf(other).some((pin) => samePoint(pin, place)));
   if (touching.some((other) => !markKinds.has(other.kind))) return null;
   const here: WireEnd = { at: 'pin', part: partId, pin: pinName };
@@ -36,7 +36,6 @@ function rejoin(bare: Sheet, before: Sheet, left: PinName, marks: Sheet['parts']
   const net = netlist.parts.find((one) => one.id === left.part)?.pins[left.pin];
   const members: PinName[] = netlist.parts.flatMap((one) => Object.entries(one.pins)
     .filter(([pin, other]) => other === net && !(one.id === left.part && pin === left.pin)).map(([pin]) => ({ part: one.id, pin })));
-  const netNow = (sheet: Sheet, { part, pin }: PinName) => sheetToNetlist(sheet).parts.find((one) => one.id === part)?.pins[pin];
   const [first] = members;
   if (!first) return bare;
   let current = bare;
@@ -45,8 +44,8 @@ function rejoin(bare: Sheet, before: Sheet, left: PinName, marks: Sheet['parts']
     if (place) current = { ...current, parts: [...current.parts, { ...mark, x: place.x, y: place.y }] };
   }
   for (const member of members) {
-    const home = net === '0' ? '0' : netNow(current, first);
-    if (home !== undefined && netNow(current, member) !== home) current = joinToNet(current, member, home, newId);
+    const home = { zero: net === '0', pins: [first] };
+    if (netOfPin(current, member) !== (home.zero ? '0' : netOfPin(current, first))) current = joinToNet(current, member, home, newId);
   }
   return current;
 }

@@ -2,7 +2,6 @@ import { tidyPath } from '@/lib/document/geometry/corners';
 import { pinPlaceOf, type PinPlace } from '@/lib/document/geometry/pin-place';
 import { indexOf } from '@/lib/document/geometry/sheet-index';
 import type { Turn } from '@/lib/document/geometry/turn';
-import { sheetToNetlist } from '@/lib/document/nets/sheet-to-netlist';
 import { findTrack } from '@/lib/document/place/find-track';
 import { leavingWay } from '@/lib/document/place/lay-net';
 import { tracksOf, trackNet } from '@/lib/document/place/sheet-tracks';
@@ -10,15 +9,10 @@ import { cellOf, pointOf, type Cell } from '@/lib/document/place/track-grid';
 import type { PartRecord, Sheet } from '@/lib/document/records';
 import { addWire } from '../edits/add-wire';
 import type { NewId } from '../edits/edit';
-import { drawnNetsNamed } from './named-net';
+import { drawnNetsNamed, nameOfHeld, netOfPin, type HeldNet, type PinName } from './named-net';
 
 /** Longest line drawn for a proposed change; beyond it the net's name is put at the pin. In grid steps with penalties. */
 const lineLimit = 90;
-
-export interface PinName {
-  readonly part: string;
-  readonly pin: string;
-}
 
 const turnOf = (drawn: { readonly x: number; readonly y: number }, pin: PinPlace): Turn =>
   ((Math.round(((Math.atan2(pin.out.y, pin.out.x) - Math.atan2(drawn.y, drawn.x)) * 180) / Math.PI / 90) * 90 + 720) % 360) as Turn;
@@ -30,10 +24,11 @@ function withMark(sheet: Sheet, kind: 'zero-volt' | 'net-name', pin: PinPlace, f
 }
 
 /** Joins a pin to a net: by a line where a short one can be drawn, for 0 V by its symbol, else by the net's name. */
-export function joinToNet(sheet: Sheet, { part: partId, pin: pinName }: PinName, net: string, newId: NewId): Sheet {
+export function joinToNet(sheet: Sheet, { part: partId, pin: pinName }: PinName, held: HeldNet, newId: NewId): Sheet {
   const part = indexOf(sheet).part.get(partId);
   const pin = part && pinPlaceOf(part, pinName);
-  if (!part || !pin || sheetToNetlist(sheet).parts.find((one) => one.id === partId)?.pins[pinName] === net) return sheet;
+  const net = nameOfHeld(sheet, held);
+  if (!part || !pin || net === undefined || netOfPin(sheet, { part: partId, pin: pinName }) === net) return sheet;
   if (net === '0') return withMark(sheet, 'zero-volt', pin, {}, newId);
   const { grid, cells } = tracksOf(sheet);
   const drawn = drawnNetsNamed(sheet, net);

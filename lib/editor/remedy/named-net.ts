@@ -32,3 +32,34 @@ export function drawnNetsNamed(sheet: Sheet, name: string): readonly { readonly 
   const names = drawnNetNames(sheet);
   return drawnNets(sheet).flatMap((net, number) => (names[number] === name ? [{ number, net }] : []));
 }
+
+export interface PinName {
+  readonly part: string;
+  readonly pin: string;
+}
+
+/** A net held on to by its pins: names that nobody gave (`N3`) change with every part that is added. */
+export interface HeldNet {
+  readonly zero: boolean;
+  readonly pins: readonly PinName[];
+}
+
+/** Takes hold of a net by its name; null when the sheet has none of that name. 0 V is always there. */
+export function holdNet(sheet: Sheet, name: string): HeldNet | null {
+  const pins = sheetToNetlist(sheet).parts.flatMap((part) => Object.entries(part.pins)
+    .filter(([, net]) => net === name).map(([pin]) => ({ part: part.id, pin })));
+  return pins.length > 0 || name === '0' ? { zero: name === '0', pins } : null;
+}
+
+/** What a held net is called now. */
+export function nameOfHeld(sheet: Sheet, held: HeldNet): string | undefined {
+  if (held.zero) return '0';
+  for (const { part: id, pin } of held.pins) {
+    const name = netOfPin(sheet, { part: id, pin });
+    if (name !== undefined) return name;
+  }
+  return undefined;
+}
+
+export const netOfPin = (sheet: Sheet, { part, pin }: PinName): string | undefined =>
+  sheetToNetlist(sheet).parts.find((one) => one.id === part)?.pins[pin];

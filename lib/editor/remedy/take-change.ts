@@ -1,5 +1,4 @@
 import type { RemedyEdit } from '@/lib/netlist/findings/finding';
-import { sheetToNetlist } from '@/lib/document/nets/sheet-to-netlist';
 import { turnedBy } from '@/lib/document/geometry/turn';
 import { pinPlaceOf } from '@/lib/document/geometry/pin-place';
 import type { PartRecord, Sheet, WireEnd } from '@/lib/document/records';
@@ -10,6 +9,7 @@ import { refusedFact, setFacts } from '../edits/set-facts';
 import { addRemedyPart } from './add-remedy-part';
 import { detachPin } from './detach-pin';
 import { joinToNet } from './join-to-net';
+import { holdNet, netOfPin, type HeldNet, type PinName } from './named-net';
 
 /** A sheet with a proposed change in it and what it touched, or why it cannot be taken. */
 export type Taken = { readonly sheet: Sheet; readonly touched: readonly string[] } | { readonly refused: string };
@@ -18,8 +18,9 @@ export type Taken = { readonly sheet: Sheet; readonly touched: readonly string[]
 export function takeChange(sheet: Sheet, edits: readonly RemedyEdit[], newId: NewId): Taken {
   let current = sheet;
   const touched: string[] = [];
+  const nets = heldNets(sheet, edits);
   for (const edit of edits) {
-    const step = takeEdit(current, edit, newId);
+    const step = takeEdit(current, edit, nets, newId);
     if ('refused' in step) return step;
     current = step.sheet;
     touched.push(...step.touched);
@@ -27,9 +28,18 @@ export function takeChange(sheet: Sheet, edits: readonly RemedyEdit[], newId: Ne
   return { sheet: current, touched };
 }
 
-function takeEdit(sheet: Sheet, edit: RemedyEdit, newId: NewId): Taken {
+/** Every net that the edits name, as it stands before the first of them. */
+function heldNets(sheet: Sheet, edits: readonly RemedyEdit[]): ReadonlyMap<string, HeldNet> {
+  const names = edits.flatMap((edit) => (edit.edit === 'add part' ? Object.values(edit.pins) : edit.edit === 'move pin' ? [edit.net] : []));
+  return new Map(names.flatMap((name) => {
+    const held = holdNet(sheet, name);
+    return held ? [[name, held] as const] : [];
+  }));
+}
+
+function takeEdit(sheet: Sheet, edit: RemedyEdit, nets: ReadonlyMap<string, HeldNet>, newId: NewId): Taken {
   if (edit.edit === 'add part') {
-    const added = addRemedyPart(sheet, edit, newId);
+    const added = addRemedyPart(sheet, edit, nets, newId);
     return 'refused' in added ? added : { sheet: added.sheet, touched: [added.part] };
   }
   if (edit.edit === 'rename net') {
@@ -53,13 +63,14 @@ function takeEdit(sheet: Sheet, edit: RemedyEdit, newId: NewId): Taken {
     case 'leave open':
       return { sheet: markOpen(sheet, part.id, edit.pin, true), touched: [part.id] };
     case 'move pin':
-      return movePin(sheet, part, edit.pin, edit.net, newId);
+      return movePin(sheet, part, edit.pin, nets.get(edit.net) ?? null, newId);
     case 'swap pins':
       return swapPins(sheet, part, edit.pins, newId);
   }
 }
 
-function movePin(sheet: Sheet, part: PartRecord, pin: string, net: string, newId: NewId): Taken {
+function movePin(sheet: Sheet, part: PartRecord, pin: string, net: HeldNet | null, newId: NewId): Taken {
+  if (!net) return { refused: 'The net it should go to is no longer there. The change was proposed for an older state.' };
   const free = detachPin(sheet, { part: part.id, pin }, newId);
   if (!free) return { refused: `${part.ref}:${pin} stands on another pin. Move ${part.ref} away first, then draw the wire.` };
   return { sheet: joinToNet(free, { part: part.id, pin }, net, newId), touched: [part.id] };
@@ -74,7 +85,13 @@ function swapPins(sheet: Sheet, part: PartRecord, [a, b]: readonly [string, stri
     const turned = withParts(sheet, (one) => (one === part ? { ...one, turn: turnedBy(one.turn, 2) } : one));
     return { sheet: { ...turned, wires: sheet.wires.map((wire) => ({ ...wire, a: swap(wire.a), b: swap(wire.b) })) }, touched: [part.id] };
   }
-  const pins = sheetToNetlist(sheet).parts.find((one) => one.id === part.id)?.pins ?? {};
-  const moved = movePin(sheet, part, a, pins[b] ?? '', newId);
-  return 'refused' in moved ? moved : movePin(moved.sheet, part, b, pins[a] ?? '', newId);
+  const [onA, onB] = [a, b].map((pin) => heldWithout(sheet, { part: part.id, pin }));
+  const moved = movePin(sheet, part, a, onB ?? null, newId);
+  return 'refused' in moved ? moved : movePin(moved.sheet, part, b, onA ?? null, newId);
+}
+
+/** The net of a pin, held on to by its other pins. */
+function heldWithout(sheet: Sheet, pin: PinName): HeldNet | null {
+  const held = holdNet(sheet, netOfPin(sheet, pin) ?? '');
+  return held && { ...held, pins: held.pins.filter((other) => other.part !== pin.part || other.pin !== pin.pin) };
 }
