@@ -2,7 +2,7 @@ import { nearestUp } from '../../series/preferred-values';
 import type { Stage } from '../../circuit/stages';
 import { seriesOn } from '../../circuit/stages';
 import type { Remedy } from '../../findings/finding';
-import { voltsOf } from '../../points/point-set';
+import { voltsOf, type RunPoint } from '../../points/point-set';
 import type { Outcome, RuleInput } from '../rule';
 import { atPoint, atStation, missingFact } from './outcome';
 import { ratingOf } from './rating';
@@ -18,8 +18,15 @@ const gateVolts = ({ terminals }: Stage): Measure => (point) => Math.abs(voltsOf
 /** Zener voltages that gates are clamped at, volts. */
 const clampVolts = [5.1, 6.8, 9.1, 12, 15, 18];
 
+/** Whether the gate stands on the side of its source that turns the transistor on. */
+function isForward({ terminals, transistor }: Stage, point: RunPoint): boolean {
+  const volts = voltsOf(point, terminals.control) - voltsOf(point, terminals.reference);
+  return transistor.kind === 'nmos' ? volts > 0 : volts < 0;
+}
+
 /** A zener from gate to source below the caution limit, where a gate resistor can take what is left; words otherwise. */
-function remedyOf(stage: Stage, rated: number, share: number): Remedy {
+function remedyOf(stage: Stage, point: RunPoint, rated: number, share: number): Remedy {
+  if (!isForward(stage, point)) return { words: `Keep the drive on one side of ${stage.transistor.ref}’s source, or clamp the gate both ways with two zeners in series.` };
   const vz = [...clampVolts].reverse().find((volts) => volts < rated * share * 0.98);
   const resistor = seriesOn(stage)[0];
   if (vz === undefined) return { words: 'Divide the drive down.' };
@@ -51,7 +58,7 @@ export function gateOutcomes({ points, parameters: { cautionShare } }: RuleInput
     if (!verdict.severity) return atPoint(verdict.point, { ...base, outcome: 'pass', message: `${transistor.ref} gate stands at most ${say(verdict.value, 'V')} from its source ${placeWords(verdict.point)} of ${say(rating.value, 'V')}`, evidence });
     const share = verdict.value / rating.value;
     return atPoint(verdict.point, {
-      ...base, outcome: 'fail', severity: verdict.severity, evidence, remedy: remedyOf(stage, rating.value, cautionShare),
+      ...base, outcome: 'fail', severity: verdict.severity, evidence, remedy: remedyOf(stage, verdict.point, rating.value, cautionShare),
       message: `${transistor.ref} gate stands ${say(verdict.value, 'V')} from its source ${placeWords(verdict.point)}: ${share > 1 ? `the oxide is rated ${say(rating.value, 'V')}` : `${say(share * 100, '%')} of its ${say(rating.value, 'V')}`}`,
     });
   });
