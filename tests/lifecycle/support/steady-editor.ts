@@ -20,6 +20,7 @@ export class SteadyEditor {
   private readonly copy = new SheetCopy();
   private unacknowledged: Sent[] = [];
   private clientSeq = 0;
+  private heard = 0;
   private stopping = false;
   private running: Promise<void> = Promise.resolve();
 
@@ -58,7 +59,8 @@ export class SteadyEditor {
       if (welcome.role !== 'maker') throw new Error('Not let in as a maker.');
       this.copy.receive(await socket.whole());
       this.take(welcome.committed);
-      for (const { clientSeq, bytes } of this.unacknowledged) socket.send({ kind: 'edit', clientSeq, bytes });
+      this.heard = 0;
+      this.sendAgain(socket);
       while (!this.stopping || this.unacknowledged.length > 0) await this.turn(socket);
     } finally {
       socket.cut();
@@ -77,8 +79,22 @@ export class SteadyEditor {
     const refused = socket.of('nack').find((nack) => !nack.retry);
     if (refused) throw new Error(`Refused: ${refused.words}`);
     this.take(Math.max(0, ...socket.of('ack').map((ack) => ack.clientSeq)));
-    const state = socket.of('state').at(-1);
-    if (state) this.take(state.committed);
+    this.heed(socket);
+  }
+
+  /** After a time of not saving the server says where it stands; what is not committed is sent again. */
+  private heed(socket: FrameSocket): void {
+    const states = socket.of('state');
+    const fresh = states.slice(this.heard);
+    this.heard = states.length;
+    for (const { saving, committed } of fresh) {
+      this.take(committed);
+      if (saving === 'saving') this.sendAgain(socket);
+    }
+  }
+
+  private sendAgain(socket: FrameSocket): void {
+    for (const { clientSeq, bytes } of this.unacknowledged) socket.send({ kind: 'edit', clientSeq, bytes });
   }
 
   private take(committed: number): void {
