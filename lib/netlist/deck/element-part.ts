@@ -53,6 +53,14 @@ function addValue(facts: MutableFacts, element: DeckElement, kind: KindId): void
     facts.value = isMissing ? undefined : (element.value ?? stated);
   } else if (element.letter === 'R') addContact(facts, element.value, kind);
   if (kind === 'switch') facts.closed_switch ??= false;
+  if (kind === 'ac-mains' && element.wave) addMains(facts, element.wave.args);
+}
+
+/** Volts rms and hertz of a plain sine, which is how a form states mains. */
+function addMains(facts: MutableFacts, [offset = 0, amplitude = 0, hertz, ...more]: readonly number[]): void {
+  if (offset !== 0 || hertz === undefined || more.some((number) => number !== 0)) return;
+  facts.rms ??= Math.abs(amplitude) / Math.SQRT2;
+  facts.f ??= hertz;
 }
 
 /** Ohms of an element that is a lead, contact, switch or fuse: its own resistance, and for a switch whether it is drawn closed. */

@@ -104,6 +104,13 @@ test('a kind that does not fit its element is told and kept as words', () => {
   expect(notices).toEqual([{ line: 2, text: 'R1: kind=NMOS does not fit this element; it is kept as words and no rule uses it.' }]);
 });
 
+test('mains is stated in volts rms and hertz; any other sine stays a wave', () => {
+  const mains = part('V1 l n SIN(0 325 50)', '*@V1 role=mains');
+  expect([mains.facts, mains.wave]).toEqual([{ f: 50, rms: expect.closeTo(229.81, 2), role: 'mains' }, undefined]);
+  expect(part('V1 l n SIN(0 325 50)', '*@V1 role=mains rms=230')).toMatchObject({ facts: { rms: 230, f: 50 }, wave: { args: [0, 325, 50] } });
+  expect(part('V1 l n SIN(5 325 50)', '*@V1 role=mains')).toMatchObject({ facts: { role: 'mains' }, wave: { args: [5, 325, 50] } });
+});
+
 test('values and levels', () => {
   expect(part('R1 a b 10m', '*@R1 kind=lead').facts).toEqual({ rs: 0.01 });
   expect(part('R1 a b 1g', '*@R1 kind=switch').facts).toEqual({ closed_switch: false });
