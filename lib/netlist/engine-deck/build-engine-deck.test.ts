@@ -30,7 +30,7 @@ describe('the deck', () => {
       { ...bareTwoPin('resistor', "R'1", `${nasty} {x}`, '0', { value: 1e3, note: nasty, part: nasty }), id: nasty },
     ]);
     expect(deck.request.lines).toEqual([
-      '.options temp=2.500000000e+1 tnom=25 reltol=0.00001',
+      '.options temp=2.500000000e+1 tnom=25 reltol=0.0001',
       'Vp1 n1 0 5.000000000e+0',
       'Rp2 n1 0 1.000000000e+3',
       '.save v(n1) i(vp1) @rp2[i]',

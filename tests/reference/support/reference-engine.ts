@@ -4,7 +4,7 @@ import type { WaveformRequest } from '@/lib/spice/engine';
 import type { Waveform } from './waveform';
 
 /** As the product's decks: models from ratings stand for 25 °C, and ngspice's own tolerance leaves 0.4 % at a 30 V zener. */
-export const roomTemperature = '.options temp=25 tnom=25 reltol=1e-5';
+export const roomTemperature = '.options temp=25 tnom=25 reltol=1e-4';
 
 export interface ReferenceEngine {
   /** An operating point; throws what the guard refused. */
