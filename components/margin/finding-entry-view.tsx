@@ -46,7 +46,7 @@ export function FindingEntryView({ entry, selected, folded, plan, shownVolts, lo
         <div className="pb-0.5">
           <p className={kind === 'stop' ? 'mt-[5px] text-body leading-tight font-semibold text-ink' : 'mt-[3px] text-ink'}><Figures>{head}</Figures></p>
           {rest ? <p className="mt-[3px] text-ink-2"><Figures>{rest}</Figures></p> : null}
-          {finding.remedy ? <p className="mt-[3px] text-ink-2"><Figures>{`Fix: ${finding.remedy.words}`}</Figures></p> : null}
+          {finding.remedy ? <p className="mt-[3px] text-ink-2"><Figures>{finding.remedy.words}</Figures></p> : null}
           {later && shownVolts !== null ? <p className="mt-[3px] text-ink-2">Not reached at <span className="figure">{voltsWords(shownVolts)}</span>.</p> : null}
           {selected ? <ProposedChange finding={finding} /> : null}
           {threads.map((thread) => (

@@ -1,5 +1,10 @@
 import { voltsWords } from '@/components/ladder/plan-words';
+import { factRegistry, type FactKey } from '@/lib/netlist/facts/fact-registry';
+import { formatFact } from '@/lib/netlist/facts/read-fact';
 import type { Finding, RemedyEdit } from '@/lib/netlist/findings/finding';
+import { kindRegistry } from '@/lib/netlist/kinds/kind-registry';
+import type { Kind } from '@/lib/netlist/kinds/kind';
+import type { FactValue } from '@/lib/netlist/netlist';
 
 /** Head and rest of a message: its first sentence stands as a heading. */
 export function splitMessage(message: string): { readonly head: string; readonly rest: string } {
@@ -23,19 +28,29 @@ export function notReached(finding: Finding, shownVolts: number | null): boolean
   return shownVolts !== null && finding.fromVolts !== null && finding.fromVolts > shownVolts;
 }
 
-function facts(values: Readonly<Record<string, unknown>>): string {
-  return Object.entries(values).filter(([, value]) => value !== null).map(([key, value]) => `${key} ${String(value)}`).join(', ');
+function factsWords(kindId: string, values: Readonly<Record<string, unknown>>): string {
+  const kind = (kindRegistry as Partial<Record<string, Kind>>)[kindId];
+  return Object.entries(values).flatMap(([key, value]) => {
+    if (value === null || value === undefined) return [];
+    const known = kind && key in factRegistry;
+    return [known ? formatFact(kind, key as FactKey, value as FactValue) : `${key} ${String(value)}`];
+  }).join(', ');
 }
+
+const netWords = (net: string): string => (net === '0' ? '0 V' : net);
 
 /** One edit of a proposed change, in words. */
 export function editWords(edit: RemedyEdit): string {
   switch (edit.edit) {
-    case 'add part': return `Add ${edit.kind} ${facts(edit.facts)} between ${Object.values(edit.pins).join(' and ')}`;
-    case 'set facts': return `${edit.part}: ${facts(edit.facts)}`;
-    case 'move pin': return `Move ${edit.part}:${edit.pin} to ${edit.net}`;
-    case 'swap pins': return `Turn ${edit.part} round`;
-    case 'rename part': return `Call it ${edit.ref}`;
-    case 'leave open': return `Mark ${edit.part}:${edit.pin} as left open`;
-    case 'rename net': return `Call net ${edit.from} ${edit.to}`;
+    case 'add part': {
+      const kind = (kindRegistry as Partial<Record<string, Kind>>)[edit.kind];
+      return `${kind?.title ?? edit.kind} ${factsWords(edit.kind, edit.facts)} from ${Object.values(edit.pins).map(netWords).join(' to ')}`;
+    }
+    case 'set facts': return `${edit.part}: ${factsWords('', edit.facts)}`;
+    case 'move pin': return `${edit.part}:${edit.pin} moves to ${netWords(edit.net)}`;
+    case 'swap pins': return `${edit.part} is turned round`;
+    case 'rename part': return `The part is called ${edit.ref}`;
+    case 'leave open': return `${edit.part}:${edit.pin} is marked as left open`;
+    case 'rename net': return `Net ${edit.from} is called ${edit.to}`;
   }
 }
