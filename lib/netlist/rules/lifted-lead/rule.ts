@@ -88,11 +88,11 @@ function resistiveOutcome(stage: Stage, { lead, ohms }: Lifted, values: Values):
   if (!off) return missingFact(transistor, 'vth_min', 'V_GS(th) minimum', base);
   const stopAt = isFet(transistor) ? off.volts * values.stopShare : off.volts;
   const cautionAt = isFet(transistor) ? off.volts * values.cautionShare : off.volts * (values.cautionShare / values.stopShare);
-  const severity: Severity | null = volts > stopAt ? 'stop' : volts >= cautionAt ? 'caution' : null;
+  const severity: Severity | null = volts > stopAt ? 'stop' : volts >= cautionAt * (1 - 1e-9) ? 'caution' : null;
   if (!off.certain && severity !== 'stop') return missingFact(transistor, 'vth_min', 'V_GS(th) minimum', base);
   const limit = severity === 'stop' ? stopAt : cautionAt;
   const evidence: readonly Evidence[] = [
-    { entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'leakage voltage', value: severity === 'caution' && volts === cautionAt ? volts * (1 + 1e-12) : volts, unit: 'V', source: `${say(leakage.amps, 'A')} ${leakage.assumed ? '(assumed)' : ''} × ${say(ohms, 'Ω')} with ${lead.name} lifted`, limit, limitSource: `${say(limit, 'V')}: from ${off.fact}` },
+    { entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'leakage voltage', value: severity === 'caution' ? Math.max(volts, cautionAt * (1 + 1e-9)) : volts, unit: 'V', source: `${say(leakage.amps, 'A')} ${leakage.assumed ? '(assumed)' : ''} × ${say(ohms, 'Ω')} with ${lead.name} lifted`, limit, limitSource: `${say(limit, 'V')}: from ${off.fact}` },
     { entity: transistor.ref, quantity: isFet(transistor) ? 'igss' : 'icbo', value: leakage.amps, unit: 'A', source: leakage.assumed ? 'assumed' : 'typed' },
     { entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'resistance', value: ohms, unit: 'Ω', source: `connections with ${lead.name} lifted` },
     ...withstands(stage, ohms, off.volts),

@@ -2,6 +2,7 @@ import type { Circuit } from '../../circuit/circuit';
 import { isOwnResistor } from '../../circuit/part-nature';
 import { isAlternating } from '../../circuit/source-role';
 import { endNets } from '../../circuit/terminals';
+import { walk } from '../../circuit/walk';
 import type { FactKey } from '../../facts/fact-registry';
 import type { NetlistPart } from '../../netlist';
 import { isSourceTouchSafe } from '../../points/touch-safe';
@@ -20,11 +21,18 @@ function isFilled(circuit: Circuit, source: NetlistPart, key: (typeof fields)[nu
   const { parts, nets } = circuit.netlist;
   if (key === 'fuse') return parts.some((part) => part.kind === 'fuse');
   if (key === 'earth') return parts.some((part) => part.kind === 'earth') || nets.some((net) => net.facts.kind === 'earth' || net.facts.earth !== undefined);
-  if (key === 'bleeder') {
-    return parts.some((part) => part.facts.bleeder !== undefined
-      || (isOwnResistor(part) && (endNets(part) ?? ['', '']).includes('0') && (endNets(part) ?? []).some((net) => net !== '0' && circuit.stiff.has(net))));
-  }
-  return false;
+  return key === 'bleeder' && hasBleeder(circuit, source);
+}
+
+/** A resistor from the source's bus to its return, or a part marked as one. */
+function hasBleeder(circuit: Circuit, source: NetlistPart): boolean {
+  const [plus, minus] = endNets(source) ?? ['', ''];
+  const bus = walk(circuit.graph, plus, { through: ({ nature }) => nature === 'joint' });
+  return circuit.netlist.parts.some((part) => {
+    if (part.facts.bleeder !== undefined && part.id !== source.id) return true;
+    const [a, b] = endNets(part) ?? ['', ''];
+    return isOwnResistor(part) && ((bus.has(a) && b === minus) || (bus.has(b) && a === minus));
+  });
 }
 
 /** Advice where the plan passes the touch-safe limit and the source does not say how people are kept from it. */
