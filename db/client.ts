@@ -41,7 +41,7 @@ export interface Connection {
 export function openDatabase(address: string): Connection {
   const pool = createPool(poolOptions(address));
   pool.pool.on('connection', (connection) => {
-    connection.query("set session tx_isolation = 'READ-COMMITTED', innodb_lock_wait_timeout = 5, time_zone = '+00:00'");
+    connection.query("set session tx_isolation = 'READ-COMMITTED', innodb_lock_wait_timeout = 5, lock_wait_timeout = 5, time_zone = '+00:00'");
   });
   return { db: drizzle(pool) as unknown as Database, pool, close: () => pool.end() };
 }

@@ -18,11 +18,13 @@ export interface RoomTiming {
   readonly snapshotIdle: number;
   /** An empty room is let go after this long. */
   readonly unloadIdle: number;
+  /** A commit that takes longer is shown as 'not saving'. */
+  readonly slowCommit: number;
   /** First and longest pause between tries to reach the database again. */
   readonly recoveryFirst: number;
   readonly recoveryLongest: number;
 }
 
 export const roomTiming: RoomTiming = {
-  snapshotRows: 500, snapshotBytes: 1024 * 1024, snapshotIdle: 60_000, unloadIdle: 60_000, recoveryFirst: 100, recoveryLongest: 2_000,
+  snapshotRows: 500, snapshotBytes: 1024 * 1024, snapshotIdle: 60_000, unloadIdle: 60_000, slowCommit: 1_500, recoveryFirst: 100, recoveryLongest: 2_000,
 };

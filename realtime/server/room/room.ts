@@ -126,12 +126,12 @@ export class Room {
 
   /** Closes every socket and takes nothing more in; resolves when what was taken in is committed or given up. */
   async drain(reason: CloseReason): Promise<void> {
-    clearTimeout(this.idleTimer);
     if (this.current === 'saving') this.turn('draining', 'The server is restarting.');
     else this.current = 'closed';
     await this.working;
     await this.snapshotting;
     this.current = 'closed';
+    clearTimeout(this.idleTimer);
     for (const member of this.fan.all()) member.close(reason);
     this.fan.presence.close();
     this.candidate.destroy();
@@ -168,7 +168,7 @@ export class Room {
     while (this.queue.length > 0 && (this.current === 'saving' || this.current === 'draining')) {
       const batch = this.queue.nextBatch();
       try {
-        const outcome = await appendRows(this.context.db, this.id, this.head, batch.map(rowOf));
+        const outcome = await this.toldWhenSlow(appendRows(this.context.db, this.id, this.head, batch.map(rowOf)));
         if (outcome.kind === 'committed') this.commit(batch);
         else if (outcome.kind === 'refused') this.dropActors(outcome.actors);
         else await this.recover('The sheet is being opened anew.');
@@ -176,6 +176,21 @@ export class Room {
         this.context.log.error({ circuitId: this.id, err: error }, 'an edit could not be stored');
         await this.recover('The database does not take edits.');
       }
+    }
+  }
+
+  /** A commit that hangs is shown for what it is; edits go on being taken in behind it. */
+  private async toldWhenSlow<T>(commit: Promise<T>): Promise<T> {
+    let slow = false;
+    const timer = setTimeout(() => {
+      slow = true;
+      this.fan.saving('not saving', 'The database has not answered yet.');
+    }, this.context.timing.slowCommit);
+    try {
+      return await commit;
+    } finally {
+      clearTimeout(timer);
+      if (slow && this.current !== 'closed') this.fan.saving(this.current, this.why);
     }
   }
 
@@ -254,6 +269,7 @@ export class Room {
 
   private end(reason: CloseReason): void {
     this.current = 'closed';
+    clearTimeout(this.idleTimer);
     for (const member of this.fan.all()) member.close(reason);
   }
 
