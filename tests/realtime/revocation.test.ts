@@ -6,7 +6,7 @@ import { readUpdatesAfter } from '@/db/queries/room-state';
 import { circuitMakers, circuits, guestLinks } from '@/db/schema/circuits';
 import { memberships, sessions } from '@/db/schema/people';
 import { SheetCopy } from '@/realtime/testing/sheet-copy';
-import { Browser, Page, pageWorld } from './support/page';
+import { Page, pageWorld, type Browser } from './support/page';
 import { addSession, type SheetPeople } from './support/people-of-the-sheet';
 import { SheetWorld } from './support/sheet-world';
 

@@ -5,7 +5,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { issueRoomTicket } from '@/db/mutations/room-ticket';
 import { sessions } from '@/db/schema/people';
 import { limits } from '@/realtime/limits';
-import { FrameSocket } from '@/realtime/testing/frame-socket';
+import type { FrameSocket } from '@/realtime/testing/frame-socket';
 import { waitFor } from '@/realtime/testing/wait-for';
 import { addSession } from './support/people-of-the-sheet';
 import { pageOrigin, SheetWorld } from './support/sheet-world';
