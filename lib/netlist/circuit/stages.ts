@@ -50,11 +50,12 @@ function joins(edge: Edge, reach: ReadonlyMap<string, Step>, references: Readonl
 
 function loadOf(graph: Graph, rails: ReadonlySet<string>, start: string): readonly Edge[] {
   if (rails.has(start)) return [];
-  const steps = walk(graph, start, {
-    through: ({ nature }) => nature === 'resistor' || nature === 'joint' || nature === 'open' || nature === 'coil' || nature === 'junction',
-    stopAt: (net) => rails.has(net),
-  });
-  return [...steps.values()].flatMap((step) => (step.via ? [step.via] : []));
+  const through = ({ nature }: Edge) => nature === 'resistor' || nature === 'joint' || nature === 'open' || nature === 'coil' || nature === 'junction';
+  const steps = walk(graph, start, { through, stopAt: (net) => rails.has(net) });
+  // Every way between the nets reached, not the first one found: a coil beside its diode is the load.
+  const inside = [...steps.keys()].filter((net) => !rails.has(net));
+  const edges = inside.flatMap((net) => graph.edgesAt(net)).filter((edge) => through(edge) && steps.has(edge.a) && steps.has(edge.b));
+  return [...new Set(edges)];
 }
 
 function stageOf(graph: Graph, rails: ReadonlySet<string>, gates: ReadonlySet<string>, sources: Sources, transistor: NetlistPart): Stage {
