@@ -1,5 +1,7 @@
 import { afterAll, describe, expect, it } from 'vitest';
+import { netlistFromDeck } from '@/lib/netlist/deck/netlist-from-deck';
 import { asDrawn } from '@/lib/netlist/engine-deck/as-drawn';
+import { runPoint } from '@/lib/netlist/engine-deck/run-point';
 import { createNodeEngine } from '@/lib/spice/node-engine';
 import { nativePoint } from './support/native-ngspice';
 import { readTestDeck } from './support/test-deck';
@@ -79,5 +81,27 @@ describe('op["as drawn"] equals native ngspice', () => {
     if (run.status === 'ok') throw new Error('was not refused');
     expect(run.refusal.code).toBe(code);
     expect(run.refusal.nodes).toEqual(nodes);
+  });
+});
+
+describe('a state of a read deck equals native ngspice with its source at that level', () => {
+  const stage = (drive: number): readonly string[] => [
+    'V1 v 0 15', `V2 c 0 ${drive}`, 'X1 v a LIM', 'R1 a 0 1k', 'I1 0 b 1m', 'R2 b 0 1k', 'M1 d g 0 MN', 'R3 v d 100', 'R4 c g 100', 'R5 g 0 22k',
+    'M2 e g 0 0 ML W=1e-3 L=1e-6', 'R6 v e 1k', 'Q1 k h 0 QN', 'R7 c h 10k', 'R8 v k 1k', 'D2 k w DX', 'R9 w 0 1k',
+    '.model MN VDMOS(VTO=3 KP=16 RD=20m RS=4m)', '.model ML NMOS(LEVEL=1 VTO=2 KP=2m)', '.model QN NPN(BF=150)', '.model DX D(IS=1n N=1.5 RS=1)',
+    '.subckt LIM p q', 'R1 p n 100', 'D1 n q DX', '.ends',
+  ];
+  const { netlist } = netlistFromDeck(readTestDeck(stage(0)));
+  const drive = netlist.parts.find(({ ref }) => ref === 'V2')?.id ?? '';
+
+  it.each([0, 3.3, 5, 10])('drive at %f V', async (volts) => {
+    const run = await runPoint(engine, netlist, { settings: { [drive]: { volts } }, corner: 'typ' });
+    if (run.status !== 'ok') throw new Error(run.refusal.words);
+    const native = nativePoint([...stage(volts), '.op']);
+    for (const [net, value] of Object.entries(run.op.volts)) {
+      const expected = net === '0' ? 0 : native[`v(${net})`] ?? Number.NaN;
+      expect(Math.abs(value - expected), net).toBeLessThanOrEqual(Math.max(1e-6, 1e-3 * Math.abs(expected)));
+    }
+    expect(run.op.amps['V1:+']).toBeCloseTo(native['i(v1)'] ?? Number.NaN, 6);
   });
 });

@@ -1,6 +1,7 @@
 import { FlattenFault, flattenSubcircuit, type FlatElement } from '../../engine-deck/flatten';
 import { isSimulated, writtenElement } from '../../engine-deck/written-element';
 import { engineNumber } from '../../models/model-line';
+import { ownCard } from '../../models/own-card';
 import type { NetlistPart } from '../../netlist';
 import type { EngineContext, EngineElements, KindEdge, KindEngine } from '../kind-engine';
 import { drawnLevel } from '../engine-source-level';
@@ -47,10 +48,15 @@ function subcircuit(part: NetlistPart, { name, node, innerNode, library }: Engin
   const meters = pins.map((pin, index) => `V${name}q${index} ${node(pin)} ${innerNode(`pin ${pin}`)} 0`);
   const place = (inner: string): string => (inner === '0' ? '0' : innerNode(inner));
   return {
-    lines: [...meters, ...flat.flatMap((element, index) => writtenElement(element, `${name}q${index}`, place))],
+    lines: [...meters, ...flat.flatMap((element, index) => writtenElement(withOwnCard(element), `${name}q${index}`, place))],
     currents: Object.fromEntries(pins.map((pin, index) => [pin, [{ vector: `i(v${name}q${index})`, sign: 1 as const }]])),
     assumed: [],
   };
+}
+
+/** A card inside keeps its own temperature among models that stand for 25 °C. */
+function withOwnCard(flat: FlatElement): FlatElement {
+  return flat.card === undefined ? flat : { ...flat, card: { ...flat.card, ...ownCard(flat.card) } };
 }
 
 function flatOrNull(make: () => readonly FlatElement[]): readonly FlatElement[] | null {
