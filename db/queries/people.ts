@@ -45,3 +45,7 @@ export async function membersAmong(db: Executor, bench: BenchId, ids: readonly s
 export async function countPeople(db: Executor): Promise<number> {
   return db.$count(people);
 }
+
+export async function peopleEmails(db: Executor): Promise<string[]> {
+  return (await db.select({ email: people.email }).from(people)).map((row) => row.email);
+}

@@ -75,3 +75,9 @@ export async function contributorsOf(db: Executor, revisionIds: readonly string[
   return db.select({ revisionId: revisionContributors.revisionId, personId: revisionContributors.personId })
     .from(revisionContributors).where(inArray(revisionContributors.revisionId, [...revisionIds]));
 }
+
+/** Letter of a circuit's newest revision; what a link to it leads to. */
+export async function newestRevisionLetter(db: Executor, circuitId: string): Promise<string | undefined> {
+  const [row] = await db.select({ letter: revisions.letter }).from(revisions).where(eq(revisions.circuitId, circuitId)).orderBy(desc(revisions.number)).limit(1);
+  return row?.letter;
+}

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import type { z } from 'zod';
 import { Problem } from '@/lib/errors/problem';
 
 /** Where a page of a list ended, as the opaque text that callers hand back. */

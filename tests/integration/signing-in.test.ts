@@ -47,17 +47,17 @@ describe('signing in', () => {
 
   it('does the same work whether or not the account exists', async () => {
     const { email } = await account();
-    const median = async (address: string) => {
-      const times: number[] = [];
-      for (let round = 0; round < 7; round += 1) {
+    const fastest = { [email]: Infinity, 'nobody@northgate.test': Infinity };
+    // In turn, so that whatever else the machine does meets both.
+    for (let round = 0; round < 8; round += 1) {
+      for (const address of Object.keys(fastest)) {
         const start = performance.now();
         await world.call(null, signInCall, { body: { email: address, password: 'wrong' }, headers: from() });
-        times.push(performance.now() - start);
+        fastest[address] = Math.min(fastest[address] ?? Infinity, performance.now() - start);
       }
-      return times.sort((a, b) => a - b)[3] ?? 0;
-    };
-    const [known, unknown] = [await median(email), await median('nobody@northgate.test')];
-    expect(Math.max(known, unknown) / Math.min(known, unknown)).toBeLessThan(2);
+    }
+    const [known = 0, unknown = 0] = Object.values(fastest);
+    expect(Math.max(known, unknown) / Math.min(known, unknown)).toBeLessThan(1.7);
   });
 
   it('delays by account and address together, so that nobody is locked out by others', async () => {

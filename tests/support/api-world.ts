@@ -7,7 +7,7 @@ import { replaceRooms } from '@/lib/rooms/room-client';
 import type { Operation } from '@/lib/http/operation';
 import type { BenchRole } from '@/lib/schemas/bench';
 import { freshDatabase } from './database';
-import { inProcessRooms, type InProcessRooms } from './in-process-rooms';
+import { inProcessRooms, type InProcessRooms } from '../../scripts/demo/in-process-rooms';
 
 export interface TestPerson { readonly id: string; readonly name: string; readonly email: string; readonly cookie: string }
 export interface TestBench { readonly id: string; readonly slug: string }

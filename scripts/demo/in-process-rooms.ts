@@ -7,7 +7,7 @@ import { roomTiming } from '@/realtime/server/room/room-context';
 import { RoomRegistry } from '@/realtime/server/room/room-registry';
 import type { RoomClient } from '@/lib/rooms/room-client';
 
-/** The realtime process's own rooms, called without a socket in between; what it was told is kept for tests to read. */
+/** The realtime process's own rooms, called without a socket in between, for the seed and for tests; what it was told is kept. */
 export interface InProcessRooms extends RoomClient {
   readonly announced: AnnounceCall[];
   readonly revoked: RevokeCall[];
