@@ -31,7 +31,9 @@ export function drawnNets(source: NetlistSource, parts: readonly DrawnPart[]): D
   for (const part of parts) {
     for (const pin of pinNames(part)) {
       const node = nodes.find(pinEnd(part.id, pin));
-      members.set(node, [...(members.get(node) ?? []), pinReference({ ref: part.ref, facts: part.facts as Facts }, pin)]);
+      const pins = members.get(node) ?? [];
+      pins.push(pinReference({ ref: part.ref, facts: part.facts as Facts }, pin));
+      members.set(node, pins);
     }
   }
   const names = nodeNames([...members.keys()], marked, nodes.find(zeroKey));

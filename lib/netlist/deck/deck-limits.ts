@@ -10,6 +10,12 @@ export const deckLimits = {
   depth: 8,
   /** Characters of an element, node, model or subcircuit name. */
   name: 40,
+  /** Nodes of one element. */
+  nodes: 64,
+  /** Characters of a pin name of a box; longer ones are replaced by numbers. */
+  pinName: 20,
+  /** Characters of one fact. */
+  fact: 2_000,
   /** Numbers of one source. */
   waveNumbers: 400,
 } as const;

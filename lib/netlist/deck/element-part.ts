@@ -4,6 +4,7 @@ import { kindOf } from '../kinds/kind-registry';
 import type { DeckElement, Facts, FactValue, NetlistPart } from '../netlist';
 import { sortedByKey } from '../connectivity/sorted-by-key';
 import { isExamined } from './deck-document';
+import { deckLimits } from './deck-limits';
 import { canonicalKindWord, kindOfWord } from './kind-word';
 import { missingValue } from './read-fact-line';
 
@@ -16,7 +17,7 @@ const joining = ['ref', 'pins', 'plus', 'minus', 'anode', 'cathode'];
 /** A part of an element, without an id, with nodes in place of nets. The model stays until it is known to say something new. */
 export function elementPart(element: DeckElement, kind: KindId, facts: ReadFacts, pins: Readonly<Record<string, string>>): Omit<NetlistPart, 'id'> {
   const own: MutableFacts = { ...facts, kind: remainingKind(facts.kind, kind) };
-  const ref = typeof facts.ref === 'string' ? facts.ref : element.name;
+  const ref = typeof facts.ref === 'string' && facts.ref.length <= deckLimits.name ? facts.ref : element.name;
   for (const fact of joining) own[fact] = undefined;
   if (kind === 'polarised-capacitor') own.polarised = undefined;
   if (kind === 'plug-contact' && own.part_of === ref) own.part_of = undefined;

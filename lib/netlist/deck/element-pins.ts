@@ -1,6 +1,7 @@
 import type { KindId } from '../kinds/kind-id';
 import { kindOf } from '../kinds/kind-registry';
 import type { DeckElement, FactValue, Subcircuit } from '../netlist';
+import { deckLimits } from './deck-limits';
 import { nodeKey } from './names';
 
 type ReadFacts = Readonly<Record<string, FactValue>>;
@@ -56,6 +57,7 @@ function twoEnds(
 /** Pins of a box: those of its subcircuit, + and − of a current source, or numbers. */
 export function boxPins(element: DeckElement, subcircuit: Subcircuit | undefined): Record<string, string> {
   const formal = element.letter === 'I' ? ['+', '-'] : (subcircuit?.pins ?? []);
-  const names = new Set(formal).size === element.nodes.length ? formal : element.nodes.map((_, index) => String(index + 1));
+  const isNamed = new Set(formal).size === element.nodes.length && formal.every(({ length }) => length <= deckLimits.pinName);
+  const names = isNamed ? formal : element.nodes.map((_, index) => String(index + 1));
   return Object.fromEntries(element.nodes.map((node, index) => [names[index] as string, node]));
 }

@@ -1,7 +1,7 @@
 import { kindIds, type KindId } from '../kinds/kind-id';
 
 /** Other words of a deck for our kinds and for those that are labels as yet. */
-const otherWords: Readonly<Record<string, string>> = { lead: 'removable-lead', gpio: 'controller-pin' };
+const otherWords: ReadonlyMap<string, string> = new Map([['lead', 'removable-lead'], ['gpio', 'controller-pin']]);
 
 /** The kind that `kind=` names, in any case; undefined for a label. */
 export function kindOfWord(word: unknown): KindId | undefined {
@@ -13,7 +13,7 @@ export function kindOfWord(word: unknown): KindId | undefined {
 export function canonicalKindWord(word: unknown): string | undefined {
   if (typeof word !== 'string') return undefined;
   const lower = word.toLowerCase();
-  const known = otherWords[lower] ?? lower;
+  const known = otherWords.get(lower) ?? lower;
   return laterKinds.has(known) || kindIds.some((id) => id === known) ? known : word;
 }
 

@@ -63,6 +63,13 @@ test('designators are the element names, or ref=; never merged', () => {
   expect(netlist.parts[1]?.facts.part_of).toBe('J1');
 });
 
+test('names that a sheet has no room for', () => {
+  const long = 'p'.repeat(30);
+  expect(Object.keys(part('X1 a b S', `.subckt S ${long} q`, `R1 ${long} q 1`, '.ends').pins)).toEqual(['1', '2']);
+  expect(part('R1 a b 1k', `*@R1 ref=${'R'.repeat(50)}`).ref).toBe('R1');
+  expect(part('R1 a b 1k', `*@R1 note=${'n'.repeat(3_000)}`).facts.note).toHaveLength(2_000);
+});
+
 describe('nets', () => {
   test('nodes keep their first spelling and no case; gnd is 0; N1 is no given name', () => {
     const { netlist } = from('R1 Gate gnd 1', 'R2 GATE n1 1', 'R3 n1 0 1');

@@ -1,5 +1,6 @@
 import type { DeckElement, ModelCard } from '../netlist';
 import { examinedLetters, type DeckNotice } from './deck-document';
+import { deckLimits } from './deck-limits';
 import type { DeckLine } from './deck-lines';
 import { DeckRefusal } from './deck-refusal';
 import { instanceParameters } from './known-parameters';
@@ -28,6 +29,7 @@ export function readElement({ text, line }: DeckLine, context: ElementContext): 
   const tokens = tokensOf(text, line).filter((token) => token.kind !== 'equals' || !isSource(letter));
   const { words, pairs } = splitPairs(tokens, line);
   const body = readBody(letter, name, [...words.slice(1), ...ownValue(letter, pairs)], context, line);
+  if (body.nodes.length > deckLimits.nodes) throw new DeckRefusal(line, `${name} has more than ${deckLimits.nodes} nodes.`);
   for (const node of body.nodes) checkName(node, `A node of ${name}`, line);
   const { area, ...rest } = body;
   const params = readParams(letter, name, pairs, context, line);

@@ -2,6 +2,7 @@ import type { FactDefinition } from '../facts/fact-definition';
 import { factRegistry, isFactKey } from '../facts/fact-registry';
 import type { FactValue } from '../netlist';
 import type { DeckNotice, FactLine } from './deck-document';
+import { deckLimits } from './deck-limits';
 import type { DeckLine } from './deck-lines';
 import { spiceNumber } from './spice-number';
 
@@ -45,7 +46,9 @@ function quoted(text: string): { raw: string; after: string } {
   return { raw, after: text.slice(index + 1).trim() };
 }
 
-function addFact(facts: Record<string, FactValue>, key: string, raw: string, name: string, line: number, notices: DeckNotice[]): void {
+function addFact(facts: Record<string, FactValue>, key: string, words: string, name: string, line: number, notices: DeckNotice[]): void {
+  const raw = words.slice(0, deckLimits.fact);
+  if (raw !== words) notices.push({ line, text: `${key} of ${name} is longer than ${deckLimits.fact} characters and is cut there.` });
   if (!isFactKey(key)) {
     notices.push({ line, text: `The fact ${key} of ${name} is not known; it is kept and no rule uses it.` });
     facts[key] = unknownValue(raw);

@@ -16,7 +16,7 @@ export function readModel({ text, line }: DeckLine, numbers: Numbers, notices: D
   const [, name, type, ...rest] = words.filter((token) => token.kind === 'word').map((token) => token.text);
   if (name === undefined || type === undefined) throw new DeckRefusal(line, 'A .model line takes a name and a type.');
   checkName(name, 'The model', line);
-  const known = modelParameters[type.toLowerCase()];
+  const known = Object.hasOwn(modelParameters, type.toLowerCase()) ? modelParameters[type.toLowerCase()] : undefined;
   if (!known) return leftOut(notices, line, `Model ${name}: the type ${type} is not known, the card is left out.`);
   const params: Record<string, number> = {};
   for (const { key, value } of pairs) {

@@ -30,7 +30,7 @@ export function parseQuantity(typed: string, expected: ExpectedQuantity): Quanti
   const text = foldTyped(typed);
   if (text === '') return refuse(`Nothing is typed; ${wants(unit, expected)}`);
   if (text.length > maxQuantityLength) return refuse(`That is too long to be a quantity; ${wants(unit, expected)}`);
-  const code = parseLetterCode(text.replace(/^([0-9A-Za-zµμ]+) ?(?:Ω|ohms?)$/iu, '$1'), unit.symbol);
+  const code = parseLetterCode(text, unit.symbol) ?? parseLetterCode(withoutUnit(text, unit), unit.symbol);
   if (code) return bounded(code, unit, expected);
   const number = headNumber(text);
   if (number.kind === 'unclear') return refuse(`${number.why}.`);
@@ -38,6 +38,13 @@ export function parseQuantity(typed: string, expected: ExpectedQuantity): Quanti
   const tail = readTail(number.rest, unit);
   if (typeof tail === 'number') return bounded({ value: scaled(number.digits, tail) }, unit, expected);
   return refuse(foreignTail(number.rest, number.digits, unit, expected));
+}
+
+/** `4k7` of `4k7 Ω`: the text up to a unit that follows a digit. */
+function withoutUnit(text: string, unit: UnitDefinition): string {
+  const spelling = [unit.symbol, ...unit.spellings].find((word) => word !== '' && text.toLowerCase().endsWith(word.toLowerCase()));
+  const bare = spelling === undefined ? text : text.slice(0, -spelling.length).trimEnd();
+  return /[0-9]$/.test(bare) ? bare : text;
 }
 
 /** Power of ten that prefix and unit at the end of a quantity stand for; undefined when they are not of this unit. */
