@@ -69,7 +69,7 @@ export class Part {
     if (existsSync(logFile) && statSync(logFile).size > largestLog) renameSync(logFile, `${logFile}.1`);
     const log = openSync(logFile, 'a', 0o600);
     // A group of its own: Ctrl-C at the terminal reaches the supervisor alone, which stops the parts in order.
-    const child = spawn(command, args, { env, cwd, detached: true, stdio: ['pipe', echo ? 'inherit' : log, echo ? 'inherit' : log] });
+    const child = spawn(command, args, { env: { ...env, HOLDOFF_SUPERVISOR: String(process.pid) }, cwd, detached: true, stdio: ['pipe', echo ? 'inherit' : log, echo ? 'inherit' : log] });
     closeSync(log);
     child.stdin?.on('error', () => {});
     this.#child = child;
