@@ -28,7 +28,10 @@ export async function runPoint(engine: PointEngine, netlist: Netlist, options: D
     const undriven = deck.weakControls.filter(({ part, net }) => {
       if (up.status === 'refused' || down.status === 'refused') return true;
       const card = netlist.models.find(({ name }) => name.toLowerCase() === part.model?.toLowerCase());
-      return Math.abs((up.op.volts[net] ?? 0) - (down.op.volts[net] ?? 0)) > allowedDrift(part, card);
+      // A floating bridge may carry its gate along: what counts is the pin against the source or emitter.
+      const reference = part.pins.S ?? part.pins.E ?? '0';
+      const drive = ({ volts }: OperatingPoint) => (volts[net] ?? 0) - (volts[reference] ?? 0);
+      return Math.abs(drive(up.op) - drive(down.op)) > allowedDrift(part, card);
     });
     if (undriven.length > 0) {
       const pins = undriven.map(({ part, pin }) => `${part.ref}:${pin}`);
