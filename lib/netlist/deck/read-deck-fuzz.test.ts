@@ -27,7 +27,7 @@ const library = ['.model MN NMOS(VTO=2)', '.model DD D', '.model QN NPN BF=100',
 
 test('any deck is answered, and one that is read is the same circuit when written and read again', () => {
   let read = 0;
-  for (let seed = 0; seed < 3_000; seed++) {
+  for (let seed = 0; seed < 1_500; seed++) {
     const random = new SeededRandom(seed);
     const lines = Array.from({ length: 1 + random.below(6) }, () => line(random));
     const reading = readDeck(['title', ...(random.chance(0.8) ? library : []), ...lines].join('\n'));
@@ -41,5 +41,5 @@ test('any deck is answered, and one that is read is the same circuit when writte
     if (!again.ok) throw new Error(`Seed ${seed}: ${JSON.stringify(again.errors)}\n${lines.join('\n')}\n---\n${writeDeck(netlist)}`);
     expect(contentHash(netlistFromDeck(again.document).netlist), `seed ${seed}\n${lines.join('\n')}`).toBe(contentHash(netlist));
   }
-  expect(read).toBeGreaterThan(500);
+  expect(read).toBeGreaterThan(250);
 });
