@@ -1,7 +1,7 @@
-import { and, eq, isNull, sql } from 'drizzle-orm';
+import { sql, type SQL } from 'drizzle-orm';
 import type { Database } from '../client';
 import { updateChecksum } from '../queries/room-checksum';
-import { readRoomGrant } from '../queries/room-grant';
+import { grantStands } from '../queries/room-grant';
 import { rtContributor, rtInstance, rtRoom, rtUpdate } from '../schema/room';
 
 export interface RowActor {
@@ -27,12 +27,6 @@ export type AppendOutcome =
   /** Nothing was written: the head is not where the caller thinks, or the room is quarantined or gone. */
   | { readonly kind: 'moved' };
 
-class Undone extends Error {
-  constructor(readonly outcome: AppendOutcome) {
-    super('The append was rolled back.');
-  }
-}
-
 /** Key of an actor; two rows with one key share a grant check. */
 export const rowActorKey = (actor: RowActor) => `${actor.personId} ${actor.sessionId ?? ''} ${actor.grantVersion}`;
 
@@ -42,41 +36,60 @@ export const rowActorKey = (actor: RowActor) => `${actor.personId} ${actor.sessi
  * @throws the driver's error when the database fails; whether a COMMIT that was under way took place is then unknown
  */
 export async function appendRows(db: Database, roomId: string, headSeq: number, rows: readonly RowToAppend[]): Promise<AppendOutcome> {
-  try {
-    await db.transaction(async (tx) => {
-      const actors = new Map(rows.map(({ actor }) => [rowActorKey(actor), actor]));
-      const refused: RowActor[] = [];
-      for (const actor of actors.values()) {
-        const grant = await readRoomGrant(tx, roomId, actor, { lock: true });
-        if (grant?.version !== actor.grantVersion) refused.push(actor);
-      }
-      if (refused.length > 0) throw new Undone({ kind: 'refused', actors: refused });
+  const actors = [...new Map(rows.map(({ actor }) => [rowActorKey(actor), actor])).values()];
+  // One round trip and one flush for each batch: what people wait for between a stroke and its acknowledgement.
+  const answer = await db.execute(sql`begin not atomic
+    declare refused varchar(1000) default '';
+    declare exit handler for sqlexception begin rollback; resignal; end;
+    start transaction;
+    ${sql.join(actors.map((actor, index) => refusalOf(roomId, actor, index)), sql` `)}
+    if refused <> '' then
+      rollback;
+      select 'refused' as kind, refused as refused;
+    else
+      update ${rtRoom} set ${column(rtRoom.headSeq)} = ${headSeq + rows.length} where ${rtRoom.roomId} = ${roomId}
+        and ${rtRoom.headSeq} = ${headSeq} and ${rtRoom.quarantinedAt} is null and ${rtRoom.tombstonedAt} is null;
+      if row_count() <> 1 then
+        rollback;
+        select 'moved' as kind;
+      else
+        ${inserts(roomId, headSeq, rows)}
+        commit;
+        select 'committed' as kind;
+      end if;
+    end if;
+  end`) as unknown as [readonly (readonly AnswerRow[])[]];
+  const row = answer[0].find(Array.isArray)?.[0] as AnswerRow | undefined;
+  if (row?.kind === 'refused') return { kind: 'refused', actors: row.refused.trim().split(' ').flatMap((index) => actors[Number(index)] ?? []) };
+  if (row?.kind === 'moved' || row?.kind === 'committed') return { kind: row.kind };
+  throw new Error('The database did not say what became of the rows.');
+}
 
-      const [head] = await tx.update(rtRoom).set({ headSeq: headSeq + rows.length }).where(and(
-        eq(rtRoom.roomId, roomId), eq(rtRoom.headSeq, headSeq), isNull(rtRoom.quarantinedAt), isNull(rtRoom.tombstonedAt),
-      ));
-      if (head.affectedRows !== 1) throw new Undone({ kind: 'moved' });
+type AnswerRow = { readonly kind: 'committed' } | { readonly kind: 'moved' } | { readonly kind: 'refused'; readonly refused: string };
 
-      const stored = rows.map((row, index) => ({
-        seq: headSeq + 1 + index, instanceId: row.instanceId, clientSeq: row.clientSeq, actorId: row.actor.personId,
-        sessionId: row.actor.sessionId, electrical: row.electrical, bytes: row.bytes,
-      }));
-      await tx.insert(rtUpdate).values(stored.map((row) => ({ ...row, roomId, sha256: updateChecksum(roomId, row) })));
+const column = ({ name }: { readonly name: string }) => sql.identifier(name);
 
-      const progress = new Map(stored.map((row) => [row.instanceId, row]));
-      await tx.insert(rtInstance).values([...progress.values()].map((row) => ({
-        roomId, instanceId: row.instanceId, personId: row.actorId, lastClientSeq: row.clientSeq, lastSeq: row.seq,
-      }))).onDuplicateKeyUpdate({ set: { lastClientSeq: sql`values(last_client_seq)`, lastSeq: sql`values(last_seq)` } });
+function refusalOf(roomId: string, actor: RowActor, index: number): SQL {
+  const stands = grantStands(roomId, actor.personId, actor.sessionId, actor.grantVersion);
+  return sql`if ${stands} = 0 then set refused = concat(refused, ${`${index} `}); end if;`;
+}
 
-      const electrical = new Map(stored.filter((row) => row.electrical).reverse().map((row) => [row.actorId, row.seq]));
-      if (electrical.size > 0) {
-        await tx.insert(rtContributor).ignore()
-          .values([...electrical].map(([personId, firstSeq]) => ({ roomId, personId, firstSeq })));
-      }
-    });
-    return { kind: 'committed' };
-  } catch (error) {
-    if (error instanceof Undone) return error.outcome;
-    throw error;
-  }
+/** The rows, how far each browser copy is, and who has made an electrical change. */
+function inserts(roomId: string, headSeq: number, rows: readonly RowToAppend[]): SQL {
+  const stored = rows.map((row, index) => ({
+    seq: headSeq + 1 + index, instanceId: row.instanceId, clientSeq: row.clientSeq, actorId: row.actor.personId,
+    sessionId: row.actor.sessionId, electrical: row.electrical, bytes: row.bytes,
+  }));
+  const list = (values: readonly SQL[]) => sql.join([...values], sql`, `);
+  const updates = stored.map((row) => sql`(${roomId}, ${row.seq}, ${row.instanceId}, ${row.clientSeq}, ${row.actorId}, ${row.sessionId},
+    ${row.electrical}, ${Buffer.from(row.bytes)}, ${updateChecksum(roomId, row)})`);
+  const progress = [...new Map(stored.map((row) => [row.instanceId, row])).values()]
+    .map((row) => sql`(${roomId}, ${row.instanceId}, ${row.actorId}, ${row.clientSeq}, ${row.seq})`);
+  const contributors = [...new Map(stored.filter((row) => row.electrical).reverse().map((row) => [row.actorId, row.seq]))]
+    .map(([personId, seq]) => sql`(${roomId}, ${personId}, ${seq})`);
+  return sql`insert into ${rtUpdate} (room_id, seq, instance_id, client_seq, actor_id, session_id, electrical, bytes, sha256)
+      values ${list(updates)};
+    insert into ${rtInstance} (room_id, instance_id, person_id, last_client_seq, last_seq) values ${list(progress)}
+      on duplicate key update last_client_seq = values(last_client_seq), last_seq = values(last_seq);
+    ${contributors.length === 0 ? sql`` : sql`insert ignore into ${rtContributor} (room_id, person_id, first_seq) values ${list(contributors)};`}`;
 }

@@ -1,4 +1,4 @@
-import { and, eq, gt, isNull, sql } from 'drizzle-orm';
+import { and, eq, gt, isNull, sql, type SQL } from 'drizzle-orm';
 import type { Executor } from '../client';
 import { circuitMakers, circuits, guestLinks } from '../schema/circuits';
 import { memberships, people, sessions } from '../schema/people';
@@ -19,49 +19,55 @@ export interface RoomGrant {
   readonly version: string;
 }
 
-/**
- * The actor's grant on a room; undefined when there is none: session ended, not in the bench, link ended, circuit gone.
- * With `lock` the rows stay as they are until the transaction ends, so nobody is removed between this read and the commit.
- */
+/** The actor's grant on a room; undefined when there is none: session ended, not in the bench, link ended, circuit gone. */
 export async function readRoomGrant(
-  db: Executor, roomId: string, actor: RoomActor, { now = new Date(), lock = false } = {},
+  db: Executor, roomId: string, actor: RoomActor, { now = new Date() } = {},
 ): Promise<RoomGrant | undefined> {
   return actor.guestLinkId !== undefined
     ? readGuestGrant(db, roomId, actor.guestLinkId, now)
-    : readPersonGrant(db, roomId, actor.personId, actor.sessionId, now, lock);
+    : readPersonGrant(db, roomId, actor.personId, actor.sessionId, now);
 }
 
 interface PersonGrantRow {
   readonly role: 'member' | 'mentor' | 'steward';
-  readonly membership: number;
   readonly archived: number;
   readonly maker: number;
-  readonly session: string | null;
   readonly name: string;
+  readonly version: string;
 }
 
-async function readPersonGrant(
-  db: Executor, roomId: string, personId: string, sessionId: string | null, now: Date, lock: boolean,
-): Promise<RoomGrant | undefined> {
-  // Drizzle writes `for share`, which MariaDB does not know.
-  const [rows] = await db.execute(sql`select ${memberships.role} as role, ${memberships.version} as membership,
-      ${circuits.archivedAt} is not null as archived, ${people.name} as name, ${sessions.id} as session,
-      (${circuitMakers.id} is not null or ${circuits.postedBy} = ${people.id}) as maker
-    from ${circuits}
+const isMaker = sql`(${circuitMakers.id} is not null or ${circuits.postedBy} = ${people.id})`;
+const isArchived = sql`${circuits.archivedAt} is not null`;
+const version = sql`concat(${memberships.role}, '.', ${memberships.version}, if(${isMaker}, '.maker', '.-'), if(${isArchived}, '.archived', '.-'))`;
+
+/** The rows that give a person a part in a circuit: at most one; none when they have no grant. */
+function personGrantRows(roomId: string, personId: string, sessionId: string | null, now: Date): SQL {
+  return sql`from ${circuits}
     join ${people} on ${people.id} = ${personId}
     join ${memberships} on ${memberships.benchId} = ${circuits.benchId} and ${memberships.personId} = ${people.id}
     left join ${circuitMakers} on ${circuitMakers.circuitId} = ${circuits.id} and ${circuitMakers.personId} = ${people.id}
       and ${circuitMakers.standing} = 1
     left join ${sessions} on ${sessions.id} = ${sessionId} and ${sessions.userId} = ${people.id}
       and ${sessions.expiresAt} > ${now} and ${sessions.endsAt} > ${now}
-    where ${circuits.id} = ${roomId} ${lock ? sql`lock in share mode` : sql``}`) as unknown as [PersonGrantRow[]];
+    where ${circuits.id} = ${roomId} and (${sessionId} is null or ${sessions.id} is not null)`;
+}
+
+/**
+ * An SQL number: 1 while the person's grant is `expected`, else 0. The rows it rests on stay as they are until the
+ * transaction ends, so that nobody is removed between this look and the commit.
+ */
+export function grantStands(roomId: string, personId: string, sessionId: string | null, expected: string, now = new Date()): SQL {
+  return sql`(select count(*) ${personGrantRows(roomId, personId, sessionId, now)} and ${version} = ${expected} lock in share mode)`;
+}
+
+async function readPersonGrant(
+  db: Executor, roomId: string, personId: string, sessionId: string | null, now: Date,
+): Promise<RoomGrant | undefined> {
+  const [rows] = await db.execute(sql`select ${memberships.role} as role, ${isArchived} as archived, ${isMaker} as maker,
+    ${people.name} as name, ${version} as version ${personGrantRows(roomId, personId, sessionId, now)}`) as unknown as [PersonGrantRow[]];
   const row = rows[0];
-  if (!row || (sessionId !== null && row.session === null)) return undefined;
-  const maker = Number(row.maker) === 1;
-  const archived = Number(row.archived) === 1;
-  return {
-    benchRole: row.role, maker, archived, name: row.name,
-    version: `${row.role}.${row.membership}.${maker ? 'maker' : '-'}.${archived ? 'archived' : '-'}`,
+  return row && {
+    benchRole: row.role, maker: Number(row.maker) === 1, archived: Number(row.archived) === 1, name: row.name, version: row.version,
   };
 }
 
