@@ -33,19 +33,27 @@ export function resistanceBetween(edges: readonly Edge[], from: string, to: stri
   const end = short.root(to);
   if (start === end) return 0;
   const live = links.map((link) => ({ a: short.root(link.a), b: short.root(link.b), siemens: link.siemens })).filter((link) => link.a !== link.b);
-  const nodes = reachable(live, start);
-  return nodes.includes(end) ? solve(live, nodes, start, end) : Infinity;
+  // What hangs behind either end carries no current: the smaller side decides, and a hub such as 0 V is not walked through.
+  const [one, other] = [reachable(live, start, end), reachable(live, end, start)];
+  if (!one.has(end)) return Infinity;
+  return one.size <= other.size ? solve(live, [...one], start, end) : solve(live, [...other], end, start);
 }
 
-function reachable(links: readonly { readonly a: string; readonly b: string }[], start: string): readonly string[] {
+/** Nets reached from `start` without passing through `end`, both included when there is a path. */
+function reachable(links: readonly { readonly a: string; readonly b: string }[], start: string, end: string): ReadonlySet<string> {
   const next = new Map<string, string[]>();
+  const note = (from: string, to: string) => {
+    const known = next.get(from);
+    if (known) known.push(to);
+    else next.set(from, [to]);
+  };
   for (const { a, b } of links) {
-    next.set(a, [...(next.get(a) ?? []), b]);
-    next.set(b, [...(next.get(b) ?? []), a]);
+    note(a, b);
+    note(b, a);
   }
   const seen = new Set([start]);
-  for (const net of seen) for (const other of next.get(net) ?? []) seen.add(other);
-  return [...seen];
+  for (const net of seen) if (net !== end) for (const other of next.get(net) ?? []) seen.add(other);
+  return seen;
 }
 
 /** Volts at `start` for one amp into it and out of `end`: Gaussian elimination on the conductance matrix. */
