@@ -58,7 +58,7 @@ it('ends when the pipe of its parent closes', async () => {
   const { plan: planned, file, script } = plan(work);
   for (const args of [planned.args, [guardian, process.execPath, script]]) {
     writeFileSync(file, '');
-    const child = spawn(process.execPath, args, { stdio: ['pipe', 'ignore', 'ignore'] });
+    const child = spawn(process.execPath, args, { stdio: ['pipe', 'ignore', 'ignore'], env: { ...process.env, HOLDOFF_SUPERVISOR: String(process.pid) } });
     expect(await waitUntil(() => pidIn(file) > 0, { timeoutMs: 5_000 })).toBe(true);
     child.stdin.end();
     expect(await waitUntil(() => !isAlive(pidIn(file)), { timeoutMs: 5_000 })).toBe(true);
