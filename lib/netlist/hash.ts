@@ -1,5 +1,6 @@
 import { sha256 } from '@noble/hashes/sha2.js';
 import { bytesToHex, utf8ToBytes } from '@noble/hashes/utils.js';
+import { addToList } from './connectivity/add-to-list';
 import { byCodeUnit } from './designators/designator';
 import type { DeckElement, Netlist, NetlistPart, Subcircuit } from './netlist';
 
@@ -59,7 +60,7 @@ function connectivity(netlist: Netlist): object {
     before = told;
     const members = new Map<string, string[]>();
     parts.forEach((part, index) => Object.entries(part.pins).forEach(([pin, net]) => {
-      members.set(net, [...(members.get(net) ?? []), `${partNumbers[index]}:${pin}`]);
+      addToList(members, net, `${partNumbers[index]}:${pin}`);
     }));
     const names = [...members.keys()];
     const numbers = ranks(names.map((name) => canonicalJson([nets.get(name), (members.get(name) as string[]).sort(byCodeUnit)])));

@@ -1,5 +1,6 @@
 import { byCodeUnit, compareDesignators } from '../designators/designator';
 import type { Facts, FactValue, Net } from '../netlist';
+import { addToList } from './add-to-list';
 import { pinEnd } from './end-key';
 import type { DrawnPart, NetlistSource } from './netlist-source';
 import { pinNames } from './pin-names';
@@ -31,9 +32,7 @@ export function drawnNets(source: NetlistSource, parts: readonly DrawnPart[]): D
   for (const part of parts) {
     for (const pin of pinNames(part)) {
       const node = nodes.find(pinEnd(part.id, pin));
-      const pins = members.get(node) ?? [];
-      pins.push(pinReference({ ref: part.ref, facts: part.facts as Facts }, pin));
-      members.set(node, pins);
+      addToList(members, node, pinReference({ ref: part.ref, facts: part.facts as Facts }, pin));
     }
   }
   const names = nodeNames([...members.keys()], marked, nodes.find(zeroKey));

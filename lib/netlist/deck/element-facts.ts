@@ -18,9 +18,14 @@ export function namedFacts(document: DeckDocument): NamedFacts {
   const nodes = new Map<string, Record<string, FactValue>>();
   const notices: DeckNotice[] = [];
   for (const { line, name, facts } of document.factLines) {
-    if (elementKeys.has(nameKey(name))) elements.set(nameKey(name), { ...elements.get(nameKey(name)), ...facts });
-    else if (nodeKeys.has(nodeKey(name))) nodes.set(nodeKey(name), { ...nodes.get(nodeKey(name)), ...facts });
+    if (elementKeys.has(nameKey(name))) addFacts(elements, nameKey(name), facts);
+    else if (nodeKeys.has(nodeKey(name))) addFacts(nodes, nodeKey(name), facts);
     else notices.push({ line, text: `The fact line names ${name}, which is neither an element nor a node of the deck.` });
   }
   return { elements, nodes, notices };
+}
+
+function addFacts(all: Map<string, Record<string, FactValue>>, key: string, facts: Readonly<Record<string, FactValue>>): void {
+  const known = all.get(key) ?? {};
+  all.set(key, Object.assign(known, facts));
 }

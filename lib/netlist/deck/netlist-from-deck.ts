@@ -1,3 +1,4 @@
+import { addToList } from '../connectivity/add-to-list';
 import { sortedByKey } from '../connectivity/sorted-by-key';
 import type { KindId } from '../kinds/kind-id';
 import { compareNetNames } from '../connectivity/drawn-nets';
@@ -99,7 +100,7 @@ function withIds(parts: readonly Omit<NetlistPart, 'id'>[]): NetlistPart[] {
 function netsOf(parts: readonly NetlistPart[], names: ReadonlyMap<string, string>, { nodes }: NamedFacts): Net[] {
   const pins = new Map<string, string[]>();
   for (const part of parts) {
-    for (const [pin, net] of Object.entries(part.pins)) pins.set(net, [...(pins.get(net) ?? []), pinReference(part, pin)]);
+    for (const [pin, net] of Object.entries(part.pins)) addToList(pins, net, pinReference(part, pin));
   }
   const keys = new Map([...names].map(([key, name]) => [name, key]));
   return [...pins].map(([name, members]): Net => {
