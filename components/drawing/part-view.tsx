@@ -2,6 +2,7 @@ import { boxHalfHeight, boxPinPlaces } from '@/lib/document/geometry/kind-shape'
 import { placed } from '@/lib/document/geometry/turn';
 import type { PartRecord } from '@/lib/document/records';
 import { kindRegistry } from '@/lib/netlist/kinds/kind-registry';
+import type { SymbolArt } from '@/lib/netlist/kinds/symbol-art';
 import { ownWords } from './part-words';
 import { SymbolView } from './symbol-view';
 
@@ -32,13 +33,19 @@ function NetNameWords({ part }: { readonly part: PartRecord }) {
   );
 }
 
+/** The drawing of a kind; a sheet shows all of its resistors as rectangles or all as zigzags. */
+export function artOf(kind: PartRecord['kind'], zigzag: boolean): SymbolArt {
+  const { symbol, alternatives } = kindRegistry[kind];
+  return zigzag && kind === 'resistor' ? alternatives?.[0] ?? symbol : symbol;
+}
+
 /** One part where it stands on the sheet, without its words at the side. */
-export function PartView({ part }: { readonly part: PartRecord }) {
+export function PartView({ part, zigzag = false }: { readonly part: PartRecord; readonly zigzag?: boolean }) {
   if (part.kind === 'note') return <NoteView part={part} />;
   const pose = `translate(${part.x} ${part.y})${part.turn === 0 ? '' : ` rotate(${part.turn})`}${part.mirror ? ' scale(-1 1)' : ''}`;
   return (
     <>
-      <g transform={pose}>{part.kind === 'box' ? <BoxView part={part} /> : <SymbolView art={kindRegistry[part.kind].symbol} />}</g>
+      <g transform={pose}>{part.kind === 'box' ? <BoxView part={part} /> : <SymbolView art={artOf(part.kind, zigzag)} />}</g>
       {part.kind === 'net-name' ? <NetNameWords part={part} /> : null}
     </>
   );

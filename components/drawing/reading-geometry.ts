@@ -50,19 +50,24 @@ function find(sheet: Sheet, anchor: MarginAnchor): { readonly ends: readonly Poi
   }
 }
 
-/** The margin's questions about a drawing that is only read. `view` and `frame` are asked for at each answer. */
+/** Answers the margin's questions about a drawing. View and drawing may change under it: the margin keeps one for the canvas's life. */
 export class ReadingGeometry implements SheetGeometry {
   private readonly listeners = new Set<() => void>();
-  private readonly labels: readonly Box[];
+  private labels: readonly Box[] | null = null;
 
   constructor(
-    private readonly sheet: Sheet,
-    private readonly frame: Box,
+    private sheet: Sheet,
+    private frame: Box,
     private view: View,
     private extent: { readonly width: number; readonly height: number },
     private readonly onReveal: (point: Point) => void,
-  ) {
-    this.labels = placeLabels(sheet).map((label) => label.box);
+  ) {}
+
+  /** Tells the margin that another drawing stands here: an edit, or a drag in progress. */
+  drawn(sheet: Sheet, frame: Box): void {
+    if (sheet === this.sheet && frame === this.frame) return;
+    [this.sheet, this.frame, this.labels] = [sheet, frame, null];
+    for (const listener of this.listeners) listener();
   }
 
   /** Tells the margin that the picture moved. */
@@ -81,6 +86,7 @@ export class ReadingGeometry implements SheetGeometry {
   }
 
   texts(): readonly ScreenBox[] {
+    this.labels ??= placeLabels(this.sheet).map((label) => label.box);
     return this.labels.map((box) => {
       const a = this.screen({ x: box.left, y: box.top });
       const b = this.screen({ x: box.right, y: box.bottom });

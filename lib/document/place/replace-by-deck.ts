@@ -1,8 +1,9 @@
 import type { Netlist, NetlistPart } from '@/lib/netlist/netlist';
 import { partBoxOf } from '../geometry/pin-place';
-import { boxesOverlap, growBox, type Point } from '../geometry/point';
+import type { Point } from '../geometry/point';
 import { sheetToNetlist } from '../nets/sheet-to-netlist';
-import { gridUnit, type PartRecord, type Sheet } from '../records';
+import type { PartRecord, Sheet } from '../records';
+import { freePlace } from './free-place';
 import { placeNetlist, recordOf, serialIds } from './place-netlist';
 import { wireUp } from './wire-up';
 
@@ -32,7 +33,7 @@ export async function replaceByDeck(sheet: Sheet, deck: Netlist, newId: (kind: s
   const shift = shiftOf(records, freshById);
   for (const part of netlist.parts.filter((other) => !keeps(other))) {
     const record = freshById.get(part.id) ?? recordOf(part);
-    records.push(freePlace({ ...record, x: record.x + shift.x, y: record.y + shift.y }, records));
+    records.push(freePlace({ ...record, x: record.x + shift.x, y: record.y + shift.y }, records.map(partBoxOf)));
   }
   const wired = wireUp(netlist, records, newId);
   return { ...rest, parts: [...records, ...wired.marks, ...notes], wires: wired.wires, junctions: wired.junctions };
@@ -72,22 +73,4 @@ function shiftOf(records: readonly PartRecord[], fresh: ReadonlyMap<string, Part
     x: middle(records.map((record) => record.x - (fresh.get(record.id)?.x ?? record.x))),
     y: middle(records.map((record) => record.y - (fresh.get(record.id)?.y ?? record.y))),
   };
-}
-
-/** The nearest place, ring by ring, at which a part stands clear of the others. */
-export function freePlace(record: PartRecord, others: readonly PartRecord[], room = 30): PartRecord {
-  const taken = others.map((other) => growBox(partBoxOf(other), room));
-  const clear = (candidate: PartRecord) => !taken.some((box) => boxesOverlap(box, partBoxOf(candidate)));
-  for (let ring = 0; ring < 200; ring += 1) {
-    const reach = ring * 2 * gridUnit;
-    const steps = ring === 0 ? 1 : ring * 2;
-    for (let step = 0; step <= steps; step += 1) {
-      const along = ring === 0 ? 0 : -reach + step * 2 * gridUnit;
-      for (const [x, y] of [[along, reach], [reach, along], [along, -reach], [-reach, along]] as const) {
-        const candidate = { ...record, x: record.x + x, y: record.y + y };
-        if (clear(candidate)) return candidate;
-      }
-    }
-  }
-  return record;
 }

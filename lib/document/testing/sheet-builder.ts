@@ -3,10 +3,10 @@ import type { KindId } from '@/lib/netlist/kinds/kind-id';
 import type { PartRecord, Sheet, WireEnd, WireRecord } from '../records';
 import { emptySheet } from '../write-sheet';
 
-/** A part at a place, with its kind's defaults; tests and the builder of the demo sheet use ids equal to designators. */
+/** A part at a place, with its kind's defaults; its id is the designator given, which marks do not show. */
 export function partAt(kind: KindId, ref: string, x: number, y: number, more: Partial<PartRecord> = {}): PartRecord {
   const facts = kindOf(kind).defaults as PartRecord['facts'];
-  return { id: ref, ref, kind, x, y, turn: 0, mirror: false, facts, origins: {}, leftOpen: [], ...more };
+  return { id: ref, ref: kindOf(kind).letter === null ? '' : ref, kind, x, y, turn: 0, mirror: false, facts, origins: {}, leftOpen: [], ...more };
 }
 
 /** `Q1:G` is a pin, anything else a junction. */

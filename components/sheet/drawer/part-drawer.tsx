@@ -1,0 +1,91 @@
+'use client';
+import { useEffect, useRef, useState, type KeyboardEvent } from 'react';
+import { artOf } from '@/components/drawing/part-view';
+import { SymbolView } from '@/components/drawing/symbol-view';
+import type { Editor } from '@/lib/editor/editor';
+import type { Kind } from '@/lib/netlist/kinds/kind';
+import { useEditorValue } from '../canvas/canvas-context';
+import { ResistorForm } from './resistor-form';
+import { searchKinds } from './search-kinds';
+
+function KindKey({ kind, zigzag, onTake, onDragStart }: { readonly kind: Kind; readonly zigzag: boolean; readonly onTake: () => void; readonly onDragStart: () => void }) {
+  const art = artOf(kind.id, zigzag);
+  const [left, top, right, bottom] = art.box;
+  const side = Math.max(right - left, bottom - top, 60) + 10;
+  const [x, y] = [(left + right) / 2 - side / 2, (top + bottom) / 2 - side / 4];
+  return (
+    <button type="button" data-kind={kind.id} onClick={onTake} onPointerDown={(event) => { if (event.button === 0 && event.pointerType === 'mouse') onDragStart(); }} className="flex h-9 w-full items-center gap-3 px-3 text-left text-md text-silk hover:bg-key-hi focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-act">
+      <svg width="60" height="30" viewBox={`${x} ${y} ${side} ${side / 2}`} aria-hidden="true" className="flex-none [--film:var(--panel)] [--ink:var(--silk)]"><SymbolView art={art} /></svg>
+      <span className="min-w-0 truncate">{kind.title}</span>
+    </button>
+  );
+}
+
+interface PartDrawerProps {
+  readonly editor: Editor;
+  readonly zigzag: boolean;
+  readonly onZigzag: (zigzag: boolean) => void;
+  /** Gives the focus to the canvas, so that keys move and turn the part in hand. */
+  readonly onTaken: () => void;
+}
+
+/** Parts by family, in the order of the job. A click or Enter takes one in hand, a drag carries it to its place. */
+export function PartDrawer({ editor, zigzag, onZigzag, onTaken }: PartDrawerProps) {
+  const [typed, setTyped] = useState('');
+  const [open, setOpen] = useState<string>('Switch');
+  const search = useRef<HTMLInputElement>(null);
+  const list = useRef<HTMLDivElement>(null);
+  const asked = useEditorValue(editor, (state) => state.tool === 'add' && state.ghost === null);
+  useEffect(() => { if (asked) search.current?.focus(); }, [asked]);
+  const groups = searchKinds(typed);
+  const take = (kind: Kind) => {
+    editor.run('hold-part', { kind: kind.id });
+    onTaken();
+  };
+  const keys = () => [...(list.current?.querySelectorAll<HTMLElement>('button') ?? [])];
+  const onKeyDown = (event: KeyboardEvent) => {
+    if (event.key === 'Escape') {
+      event.preventDefault();
+      setTyped('');
+      editor.run('tool-select');
+      onTaken();
+    } else if (event.key === 'ArrowDown' || event.key === 'ArrowUp') {
+      event.preventDefault();
+      const all = keys();
+      const at = all.indexOf(document.activeElement as HTMLElement);
+      (event.key === 'ArrowDown' ? all[at + 1] : all[at - 1] ?? search.current)?.focus();
+    } else if (event.key === 'Enter' && event.target === search.current) {
+      event.preventDefault();
+      const first = groups[0]?.kinds[0];
+      if (first && typed.trim() !== '') take(first);
+    }
+  };
+  return (
+    <aside aria-label="Parts" onKeyDown={onKeyDown} className="groove-r flex w-[196px] flex-none flex-col overflow-y-auto bg-panel max-tablet:hidden print:hidden">
+      <div className="relative p-2.5">
+        <label className="sr-only" htmlFor="drawer-search">Add a part</label>
+        <input ref={search} id="drawer-search" type="search" value={typed} placeholder="Add a part" autoComplete="off" onChange={(event) => setTyped(event.target.value)} className="h-[30px] w-full rounded-key border border-edge bg-film pr-9 pl-2.5 text-md text-ink placeholder:text-ink-2" />
+        <kbd aria-hidden="true" className="absolute top-[15px] right-4 rounded-key border border-edge px-1.5 font-mono text-legend text-ink-2">0</kbd>
+      </div>
+      <div ref={list} className="min-h-0 flex-1">
+        {groups.length === 0 ? <p className="px-3 py-2 text-sm text-silk-2">No part is called so. Try its use: clamp, drive, contact.</p> : null}
+        {groups.map(({ family, kinds }) => {
+          const shown = typed.trim() !== '' || open === family;
+          return (
+            <section key={family} className="groove-b">
+              <h3>
+                <button type="button" aria-expanded={shown} onClick={() => setOpen(open === family ? '' : family)} className="flex h-7 w-full items-center gap-2 px-2.5 text-left">
+                  <span aria-hidden="true" className={shown ? 'rotate-90 text-legend' : 'text-legend'}>▸</span>
+                  <span className="silk flex-1 text-silk">{family}</span>
+                  <span className="font-mono text-legend text-silk-2">{kinds.length}</span>
+                </button>
+              </h3>
+              {shown ? kinds.map((kind) => <KindKey key={kind.id} kind={kind} zigzag={zigzag} onTake={() => take(kind)} onDragStart={() => editor.run('hold-part', { kind: kind.id })} />) : null}
+            </section>
+          );
+        })}
+      </div>
+      <ResistorForm zigzag={zigzag} onZigzag={onZigzag} />
+    </aside>
+  );
+}

@@ -1,0 +1,53 @@
+import { formatFact } from '@/lib/netlist/facts/read-fact';
+import { kindOf } from '@/lib/netlist/kinds/kind-registry';
+import { sheetToNetlist } from '@/lib/document/nets/sheet-to-netlist';
+import type { PartRecord, Sheet } from '@/lib/document/records';
+import { drawnNetNames } from '../remedy/named-net';
+import { drawnNets } from '@/lib/document/nets/drawn-net';
+import { netWords } from './net-at';
+
+/** First value that a kind prints: `10 kΩ`; empty when it is not given. */
+function mainValue(part: PartRecord): string {
+  const kind = kindOf(part.kind);
+  const key = kind.printed[0];
+  const value = key === undefined ? undefined : part.facts[key];
+  return key === undefined || value === undefined ? '' : formatFact(kind, key, value as Parameters<typeof formatFact>[2]);
+}
+
+/** What a part is and what it joins, as it is spoken: `R2, 10 kΩ, from GATE to 0 V`. */
+export function spokenPart(sheet: Sheet, part: PartRecord): string {
+  const words = typeof part.facts.name === 'string' ? part.facts.name : typeof part.facts.text === 'string' ? part.facts.text : '';
+  if (part.kind === 'note') return `Note: ${words}`;
+  if (part.kind === 'net-name') return `Net name ${words}`;
+  if (part.kind === 'zero-volt') return '0 V';
+  if (part.kind === 'earth') return 'Earth';
+  const pins = Object.entries(sheetToNetlist(sheet).parts.find((one) => one.id === part.id)?.pins ?? {});
+  const lead = [part.ref, part.kind === 'box' ? 'not examined' : mainValue(part) || kindOf(part.kind).title].filter(Boolean).join(', ');
+  const open = part.leftOpen.length > 0 ? `, ${part.leftOpen.join(' and ')} left open` : '';
+  const [first, second] = pins;
+  if (pins.length === 1 && first) return `${lead}, on ${netWords(first[1])}${open}`;
+  if (pins.length === 2 && first && second) return `${lead}, from ${netWords(first[1])} to ${netWords(second[1])}${open}`;
+  return `${lead}, ${pins.map(([pin, net]) => `${pin} on ${netWords(net)}`).join(', ')}${open}`;
+}
+
+/** What a wire joins, as it is spoken: `Wire, net GATE: Q1:G, R3:2`. */
+export function spokenWire(sheet: Sheet, wireId: string): string {
+  const number = drawnNets(sheet).findIndex((net) => net.wires.includes(wireId));
+  const name = drawnNetNames(sheet)[number];
+  const refs = new Map(sheet.parts.map((part) => [part.id, part.ref]));
+  const pins = (drawnNets(sheet)[number]?.pins ?? []).filter((pin) => refs.get(pin.part)).map((pin) => `${refs.get(pin.part)}:${pin.pin}`);
+  if (name === undefined) return 'Wire, joins no part';
+  return `Wire, net ${netWords(name)}${pins.length > 0 ? `: ${pins.slice(0, 8).join(', ')}` : ''}`;
+}
+
+const cache = new WeakMap<Sheet, ReadonlyMap<string, string>>();
+
+/** What every part and wire of a sheet is called aloud, by id; worked out once for each sheet. */
+export function spokenItems(sheet: Sheet): ReadonlyMap<string, string> {
+  const known = cache.get(sheet) ?? new Map([
+    ...sheet.parts.map((part) => [part.id, spokenPart(sheet, part)] as const),
+    ...sheet.wires.map((wire) => [wire.id, spokenWire(sheet, wire.id)] as const),
+  ]);
+  cache.set(sheet, known);
+  return known;
+}
