@@ -10,7 +10,7 @@ import { ledAmps, ledLimitSource, weakestLed } from '../support/led-current';
 import { everywhere, atPoint } from '../support/outcome';
 import { heatLimits, magnitudeAcross, powerRating, resistorWatts } from '../support/resistor-heat';
 import { voltageRating } from '../support/resistor-volts';
-import { crossingEvidence, crossingVolts, judgeStress, stressEvidence, type Measure, type StressLimit, type StressVerdict } from '../support/stress';
+import { crossingEvidence, crossingVolts, judgeStress, nominalWorst, stressEvidence, type Measure, type StressLimit, type StressVerdict } from '../support/stress';
 import { listWords, placeWords, say, stationWords } from '../support/words';
 
 const parameters = {
@@ -95,8 +95,14 @@ const overWords = ({ stress }: Judged): string => {
   return `${stress.part.ref} over its ${say(stress.rated, stress.unit)}${from === undefined ? '' : ` from ${say(from, 'V')}`}`;
 };
 
-const readings = (judged: readonly Judged[]): string =>
-  listWords(judged.filter(({ stress }) => stress.quantity !== 'voltage').map(({ stress, verdict }) => `${say(verdict.value, stress.unit)} ${stress.quantity === 'current' ? 'in' : 'from'} ${stress.part.ref}`));
+/** Amps and watts at a station's stated value: `269 mA in D1 and 87 W from R1`. */
+function readings(points: PointSet, station: Station, stresses: readonly Stress[]): string {
+  const shown = [...stresses.filter(({ quantity }) => quantity === 'current'), ...stresses.filter(({ quantity }) => quantity === 'power')];
+  return listWords(shown.flatMap((stress) => {
+    const value = nominalWorst(points, station, stress.measure, stress);
+    return value === undefined ? [] : [`${say(value, stress.unit)} ${stress.quantity === 'current' ? 'in' : 'from'} ${stress.part.ref}`];
+  }));
+}
 
 function groupOutcome(input: RuleInput<typeof parameters>, group: Group): Outcome {
   const { points } = input;
@@ -136,11 +142,12 @@ function failOutcome(points: PointSet, group: Group, base: Pick<Outcome, 'severi
     ...(byStation[failing - 1] ?? []).map(({ stress, verdict }) => ({ entity: stress.part.ref, quantity: `${stress.quantity} within limits`, value: verdict.value, unit: stress.unit, source: `operating point ${placeWords(verdict.point)}` })),
     ...(failing === top ? [] : over.map(({ stress, verdict }) => ({ entity: stress.part.ref, quantity: `${stress.quantity} at the top of the plan`, value: verdict.value, unit: stress.unit, source: `operating point ${placeWords(verdict.point)}` }))),
   ];
+  const quoted = (byStation[top] ?? []).map(({ stress }) => stress).filter(({ part }) => concerned.includes(part));
   const topWords = stationWords(points.stations[top]!);
   return atPoint(decisive.verdict.point, {
     ...base, outcome: 'fail', evidence, refs: [...concerned, ...group.transistors].map((part) => part.ref),
     message: `${names} ${concerned.length > 1 ? 'suit' : 'suits'} ${say(lastGood.volts ?? 0, 'V')} only: ${said.map(overWords).join('; ')}. `
-      + `${topWords[0]!.toUpperCase()}${topWords.slice(1)}: ${readings(byStation[top] ?? [])}. Within limits ${stationWords(lastGood)}: ${readings(byStation[failing - 1] ?? [])}`,
+      + `${topWords[0]!.toUpperCase()}${topWords.slice(1)}: ${readings(points, points.stations[top]!, quoted)}. Within limits ${stationWords(lastGood)}: ${readings(points, lastGood, quoted)}`,
     remedy: { words: indicator
       ? 'Feed the indicator from a low-voltage supply of its own, or size it for the highest hold point and accept that it glows dimly at the first.'
       : 'Size the network for the highest hold point, or feed the gate from a supply of its own.' },

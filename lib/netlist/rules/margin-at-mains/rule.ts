@@ -39,7 +39,7 @@ function deviceMargins({ circuit, parameters: { deviceShare, ringing } }: Input)
       const volts = measure(point);
       return volts === undefined || !inductive ? volts : volts + (volts - clampVolts) * ringing;
     };
-    const words = [...(clampVolts > 0 ? [`${say(clampVolts, 'V')} of its clamp`] : []), ...(inductive ? [`${ringing * 100} % ringing`] : [])];
+    const words = [...(clampVolts > 0 ? [`${say(clampVolts, 'V')} of its clamp`] : []), ...(inductive ? [`${say(ringing * 100, '%')} ringing`] : [])];
     return { part, quantity: across, rating, share: deviceShare, measure, rung, added: words.length > 0 ? ` with ${words.join(' and ')}` : '' };
   });
 }
@@ -70,7 +70,7 @@ function marginOutcomes({ points }: Input, { part, quantity, rating, share, meas
       ...base, outcome: 'fail', severity: verdict.severity, confidence: verdict.severity === 'stop' ? 'proven' : 'likely', evidence,
       message: verdict.severity === 'stop'
         ? `${part.ref} sees ${say(verdict.value, 'V')} ${placeWords(verdict.point)}; it is rated ${say(rating.value, 'V')}`
-        : `${part.ref} sees ${say(verdict.value, 'V')}${added} ${placeWords(verdict.point)}: ${say((verdict.value / rating.value) * 100, '%')} of its ${say(rating.value, 'V')}, ${share * 100} % is the limit on the mains`,
+        : `${part.ref} sees ${say(verdict.value, 'V')}${added} ${placeWords(verdict.point)}: ${say((verdict.value / rating.value) * 100, '%')} of its ${say(rating.value, 'V')}, ${say(share * 100, '%')} is the limit on the mains`,
       remedy: { words: `Use a part rated ${say(verdict.value / share, 'V')} or more.` },
     });
   });

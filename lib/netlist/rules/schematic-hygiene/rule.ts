@@ -1,4 +1,4 @@
-import { quantityOf } from '../../circuit/part-facts';
+import { isYes, quantityOf } from '../../circuit/part-facts';
 import { isCapacitor, isInternal, isLoad, isOwnResistor } from '../../circuit/part-nature';
 import { nextDesignator, splitDesignator } from '../../designators/designator';
 import { kindOf } from '../../kinds/kind-registry';
@@ -38,12 +38,17 @@ function judgeValue(part: NetlistPart): readonly Outcome[] {
   })];
 }
 
+/** A deck's speaking names (`RLOAD`, `VDD`) carry their class letter without a number. */
+function hasClassLetter(ref: string, accepted: readonly string[]): boolean {
+  const letters = splitDesignator(ref)?.letters.toUpperCase();
+  return letters === undefined ? accepted.some((letter) => ref.toUpperCase().startsWith(letter)) : accepted.includes(letters);
+}
+
 function judgeDesignator(part: NetlistPart, taken: readonly string[]): readonly Outcome[] {
   const accepted = classLetters[part.kind];
-  if (!accepted || part.ref === '' || isInternal(part)) return [];
+  if (!accepted || part.ref === '' || isInternal(part) || isLoad(part) || isYes(part, 'wire')) return [];
   const base = { severity: 'advice', target: { part: [part.id], point: ['designator'] }, refs: [part.ref] } as const;
-  const letters = splitDesignator(part.ref)?.letters.toUpperCase();
-  const usual = letters !== undefined && accepted.includes(letters);
+  const usual = hasClassLetter(part.ref, accepted);
   const evidence = [{ entity: part.ref, quantity: 'class letter of its kind', value: usual, unit: '', source: 'sheet', limitSource: 'ASME Y14.44 and everyday use' }];
   if (usual) return [everywhere({ ...base, outcome: 'pass', message: `${part.ref} has a class letter of its kind`, evidence })];
   const ref = nextDesignator(accepted[0]!, taken);

@@ -47,6 +47,12 @@ export function judgeStress(points: PointSet, station: Station, measure: Measure
   return rest ? { severity: null, ...rest, limit: limits[limits.length - 1]! } : null;
 }
 
+/** The worst of a stress at a station's stated value alone, without any band. */
+export function nominalWorst(points: PointSet, station: Station, measure: Measure, { heat }: { readonly heat: boolean }): number | undefined {
+  const usable = points.at(station).filter((point) => point.key.level !== '+10 %' && !(heat && point.staticOn));
+  return largest(usable, measure)?.value;
+}
+
 /** Evidence of a stress: the number, where it was read, its limit and the limit's source. */
 export function stressEvidence(entity: string, quantity: string, unit: string, { point, value, limit }: StressVerdict): Evidence {
   return { entity, quantity, value, unit, source: pointWords(point), limit: limit.limit, limitSource: limit.source };
