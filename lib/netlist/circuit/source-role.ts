@@ -15,7 +15,8 @@ export function roleOf(part: NetlistPart): SourceRole | undefined {
   const role = labelOf(part, 'role');
   if (role !== undefined && roles.has(role)) return role as SourceRole;
   if (pinWords.has(labelOf(part, 'kind') ?? '')) return 'pin';
-  return byKind[part.kind];
+  // A deck's source with a wave is read as a generator; nobody has said what it is for.
+  return part.kind === 'signal-generator' && part.wave ? undefined : byKind[part.kind];
 }
 
 export const isMains = (part: NetlistPart): boolean => isVoltageSource(part) && (roleOf(part) === 'mains' || isYes(part, 'mains'));

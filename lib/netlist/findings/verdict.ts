@@ -2,11 +2,15 @@ import type { Evidence } from './finding';
 
 /** Quantities that must reach their limit; every other quantity must not pass it. */
 const lowerBounded: ReadonlySet<string> = new Set([
-  'DC paths', 'clamps', 'series resistors', 'pins on the net', 'values given', 'gate drive', 'differing characters', 'headroom', 'fields filled', 'series members',
+  'DC paths', 'clamps', 'series resistors', 'pins', 'gate drive', 'fields filled',
 ]);
 
-/** Whether one piece of evidence, taken alone, breaks the limit it names. Evidence without a limit breaks nothing. */
+/**
+ * Whether one piece of evidence, taken alone, speaks against the circuit: a number past the limit it names, or something
+ * that should be there and is not (`false`, or no words). A number without a limit breaks nothing.
+ */
 export function breaksLimit({ quantity, value, limit }: Evidence): boolean {
+  if (value === false || value === '') return true;
   if (limit === undefined || typeof value !== 'number') return false;
   return lowerBounded.has(quantity) ? value < limit : value > limit;
 }
