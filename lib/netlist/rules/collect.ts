@@ -1,5 +1,5 @@
 import type { Finding, OutcomeKind, Severity } from '../findings/finding';
-import { fingerprintOf } from '../findings/fingerprint';
+import { fingerprintOf, targetKey } from '../findings/fingerprint';
 import type { Station } from '../points/station';
 import type { Outcome, Rule } from './rule';
 
@@ -70,9 +70,11 @@ function toFinding(rule: Pick<Rule, 'id' | 'version'>, all: readonly Placed[], s
 export function collect(rule: Pick<Rule, 'id' | 'version'>, outcomes: readonly Outcome[], stations: readonly Station[]): readonly Collected[] {
   const groups = new Map<string, Placed[]>();
   for (const outcome of outcomes) {
-    const key = fingerprintOf(rule.id, rule.version, outcome.target);
+    const key = targetKey(rule.id, rule.version, outcome.target);
     const place = Math.max(0, stations.findIndex((station) => station.holdPoint === outcome.holdPoint));
-    groups.set(key, [...(groups.get(key) ?? []), { outcome, place }]);
+    const group = groups.get(key);
+    if (group) group.push({ outcome, place });
+    else groups.set(key, [{ outcome, place }]);
   }
   return [...groups.values()].map((group) => toFinding(rule, group, stations));
 }

@@ -24,11 +24,23 @@ export function decadeOf(series: SeriesName): readonly number[] {
 /** Values are compared with this relative slack, so that 4700 computed as 4699.999… is 4700. */
 const slack = 1e-9;
 
+const ladders = new Map<string, readonly number[]>();
+
+/** The series' values of a decade and of those beside it, each the number that its digits read as; worked out once. */
+function ladder(series: SeriesName, decade: number): readonly number[] {
+  const key = `${series} ${decade}`;
+  const known = ladders.get(key);
+  if (known) return known;
+  const made = [decade - 1, decade, decade + 1].flatMap((power) => hundredths[series].map((step) => Number(`${step}e${power - 2}`)));
+  ladders.set(key, made);
+  return made;
+}
+
 /** Preferred value just under (or at) and just over (or at) `value`, both the same when it is one. `value` > 0. */
 export function neighbours(value: number, series: SeriesName): readonly [below: number, above: number] {
   if (!(value > 0) || !Number.isFinite(value)) throw new RangeError('Preferred values are positive');
   const decade = Math.floor(Math.log10(value) + slack);
-  const steps = [decade - 1, decade, decade + 1].flatMap((power) => hundredths[series].map((step) => Number(`${step}e${power - 2}`)));
+  const steps = ladder(series, decade);
   const below = steps.findLast((step) => step <= value * (1 + slack)) as number;
   const above = steps.find((step) => step >= value * (1 - slack)) as number;
   return [below, above];
