@@ -46,6 +46,7 @@ describe('refusals carry line and reason', () => {
     ['R1 a b 4k7x9', '4k7x9 is not a number.'],
     ['R1 a b 1,5k', '1,5k has a comma; a deck takes a point: 1.5k.'],
     ['R1 a b 1k 5', 'R1: 5 is not understood after its value.'],
+    ['C1 a b 1n CM', 'C1: CM is not understood after its value.'],
     ['V1 a', 'V1 has too few nodes: it takes 2.'],
     ['V1 a 0 DC', 'V1 has no number after DC.'],
     ['V1 a 0 5 6', 'V1: 6 is not understood after its value.'],
@@ -133,6 +134,11 @@ describe('statements', () => {
   test('an = is as good as a space; a bare number after a model is its area', () => {
     const { elements } = document('V1 a 0 DC = 5', 'R1 a b R=1k TC1=1m', 'D1 a k DD 2 OFF', 'R2 a b {x}', '.param x=1M');
     expect(elements.map(({ value, params }) => [value, params])).toEqual([[5, {}], [1_000, { tc1: 1e-3 }], [undefined, { area: 2 }], [1e-3, {}]]);
+  });
+
+  test('a resistor has a model before or after its value', () => {
+    const { elements } = document('R1 a b RM 1k', 'R2 a b 1k RM', 'R3 a b RM L=10u', '.model RM R(TC1=1m)');
+    expect(elements.map(({ value, model }) => [value, model])).toEqual([[1_000, 'RM'], [1_000, 'RM'], [undefined, 'RM']]);
   });
 
   test('.param is a number that {name} stands for, wherever it is written', () => {

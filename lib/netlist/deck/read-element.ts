@@ -64,6 +64,7 @@ function nodes(name: string, words: readonly Token[], count: number, line: numbe
   return found;
 }
 
+/** A value, a model, a model and a value, or for R a value and a model, as ngspice takes them. */
 function passive(name: string, words: readonly Token[], { numbers, notices }: ElementContext, line: number): Body {
   const ends = nodes(name, words, 2, line);
   const [, second, third, fourth, ...rest] = words;
@@ -76,7 +77,10 @@ function passive(name: string, words: readonly Token[], { numbers, notices }: El
   }
   if (rest.length > 0) throw new DeckRefusal(line, `${name}: ${(rest[0] as Token).text} is not understood.`);
   const value = numbers.tryRead(third, line);
-  if (value !== undefined && fourth) throw new DeckRefusal(line, `${name}: ${fourth.text} is not understood after its value.`);
+  if (value !== undefined && fourth) {
+    if (/^r/i.test(name) && fourth.kind === 'word' && /^[A-Za-z_]/.test(fourth.text)) return { nodes: ends, value, model: fourth.text };
+    throw new DeckRefusal(line, `${name}: ${fourth.text} is not understood after its value.`);
+  }
   if (value === undefined && (third.kind !== 'word' || !/^[A-Za-z_]/.test(third.text))) numbers.read(third, line);
   if (third.kind === 'word' && readsAsMilli(third.text)) notices.push({ line, text: `${name}: ${third.text} is a thousandth in a deck; a million is written MEG.` });
   if (value !== undefined) return { nodes: ends, value };
