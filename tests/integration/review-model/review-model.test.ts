@@ -87,7 +87,9 @@ async function runChain(seed: number, count: number): Promise<{ readonly signed:
   let signed = 0;
   let raced = 0;
   for (let done = 0; done < count;) {
-    let { stage, model } = await begin(chain);
+    const begun = await begin(chain);
+    const { stage } = begun;
+    let { model } = begun;
     for (let round = 0; round < stepsEach && done < count; round += 1, done += 1) {
       const action = choose(random, model, ids);
       const other = random.chance(0.15) ? rival(random, model, ids, action) : undefined;
