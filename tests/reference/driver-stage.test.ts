@@ -135,6 +135,16 @@ describe('gates that reach 0 V through junctions or channels only (docs/engine.m
     expect(held.volts.g).toBeCloseTo(0, 3);
   });
 
+  it.each([0, 5])('a pair of transistors, the second base on the first emitter, is driven at %d V', async (volts) => {
+    const pair: readonly NetlistPart[] = [
+      source('V1', 'v', 12), source('V2', 'p', volts), resistor('R1', 'p', 'b', 10e3), resistor('R2', 'v', 'c', 100), resistor('R3', 'b', '0', 10e3),
+      barePart('npn', 'Q1', { C: 'c', B: 'b', E: 'm' }, { hfe_min: 100 }), barePart('npn', 'Q2', { C: 'c', B: 'm', E: '0' }, { hfe_min: 100 }),
+      resistor('R4', 'm', '0', 100e3),
+    ];
+    const run = await point(bareNetlist(pair), {});
+    expect(run.volts.c).toBeCloseTo(volts === 0 ? 12 : 0.9, 0);
+  });
+
   it('an open base is refused, one behind a resistor from a source is not', async () => {
     const base: readonly NetlistPart[] = [source('V1', 'v', 12), resistor('R1', 'v', 'c', 1e3), barePart('npn', 'Q1', { C: 'c', B: 'b', E: '0' }, { hfe_min: 100 })];
     expect(await refusal(bareNetlist(base), {})).toMatchObject({ parts: ['Q1'] });

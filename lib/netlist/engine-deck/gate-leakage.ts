@@ -3,6 +3,8 @@ import { magnitude } from '../models/fact-number';
 import { engineNumber } from '../models/model-line';
 import { thresholdAt } from '../models/mosfet-threshold';
 import type { ModelCard, NetlistPart } from '../netlist';
+import type { OperatingPoint } from '../points/point';
+import type { ControlPin } from '../precheck/precheck';
 import type { EngineNames } from './engine-names';
 
 /** I_GSS or I_CBO that nobody gave, amps: ten times what data sheets print (docs/rules.md D, `lifted-lead`). */
@@ -20,12 +22,33 @@ export function leakageLine(part: NetlistPart, name: string, sign: 1 | -1, names
   });
 }
 
-/** How far leakage may move a control pin before it counts as undriven, volts. */
-export function allowedDrift(part: NetlistPart, card: ModelCard | undefined): number {
-  if (isBipolar(part)) return driftShare * bipolarOff;
+/** An operating point without leakage and with it both ways; null where the run with leakage was refused. */
+export interface LeakageRuns {
+  readonly plain: OperatingPoint;
+  readonly into: OperatingPoint | null;
+  readonly outOf: OperatingPoint | null;
+}
+
+/** Whether leakage alone decides what a transistor does: it moves a gate, or turns a bipolar transistor on that is off. */
+export function isUndriven({ part, net }: ControlPin, { plain, into, outOf }: LeakageRuns, card: ModelCard | undefined): boolean {
+  if (isBipolar(part)) {
+    const leaky = part.kind === 'npn' ? into : outOf;
+    return forwardVolts(part, plain) < bipolarOff && (leaky === null || forwardVolts(part, leaky) >= bipolarOff);
+  }
+  if (into === null || outOf === null) return true;
+  return Math.abs((into.volts[net] ?? 0) - (outOf.volts[net] ?? 0)) > allowedDrift(part, card);
+}
+
+function allowedDrift(part: NetlistPart, card: ModelCard | undefined): number {
   const threshold = thresholdAt(part.facts, 'min');
   if (!('missing' in threshold)) return driftShare * threshold.volts;
   return driftShare * Math.abs(card?.params.vto ?? card?.params.vth0 ?? 0);
+}
+
+/** V_BE in the direction that turns the transistor on. */
+function forwardVolts(part: NetlistPart, point: OperatingPoint): number {
+  const volts = (pin: string): number => point.volts[part.pins[pin] ?? '0'] ?? 0;
+  return (volts('B') - volts('E')) * (part.kind === 'npn' ? 1 : -1);
 }
 
 function isBipolar(part: NetlistPart): boolean {
