@@ -2,6 +2,7 @@
 import { useCallback, useMemo, useState } from 'react';
 import { touchSafeVolts } from '@/components/ladder/ladder-point';
 import { Margin } from '@/components/margin/margin';
+import { ToolStrip } from '@/components/sheet/tool-strip';
 import { MarginProvider } from '@/components/margin/margin-context';
 import { marginEntries, noteKey } from '@/components/margin/margin-entry';
 import type { MarginAnchor, SheetGeometry } from '@/components/margin/sheet-geometry';
@@ -51,6 +52,7 @@ export function SheetPage() {
   const [pane, setPane] = useState<PhonePane>('drawing');
   const [draft, setDraft] = useState<{ readonly anchor: Anchor; readonly words: string } | null>(null);
   const [planning, setPlanning] = useState(false);
+  const [listing, setListing] = useState(false);
 
   const entries = useMemo(() => marginEntries(live?.findings ?? [], threads.data ?? []), [live?.findings, threads.data]);
   const take = useCallback((finding: Finding) => { if (finding.remedy?.edits) editor?.run('take-change', { edits: finding.remedy.edits }); }, [editor]);
@@ -78,6 +80,7 @@ export function SheetPage() {
       ladder={<LadderRow block={<RevisionBlock letter={null} title={under} under={circuit.data.makers.map((maker) => maker.name).join(', ')} />} points={points} shown={shown} onShow={show} signed={signedState(revisions.data, null, moved, new Date())} flags={stopFlags(entries, points)} act={act(false)} />}
       cautions={point && point.peak > touchSafeVolts ? <CautionsLine volts={point.peak} /> : null}
       foot={<>{session && snapshot ? <RefusedEdits session={session} snapshot={snapshot} /> : null}<PhoneSwitch pane={pane} count={entries.length} onPane={setPane} /></>}
+      tools={editor ? <ToolStrip editor={editor} onCommands={() => setListing(!listing)} /> : null}
       status={<SheetStatus snapshot={snapshot} session={session} live={live} entries={entries} plan={plan} message={state?.message ?? null} readOnly={state?.readOnly ?? true} />}
     >
       <MarginProvider value={{ rights: { write: may('write notes'), edit: may('edit the sheet'), mentor: may('resolve a note') && !may('edit the sheet'), personId: person.id }, actions }}>
@@ -95,8 +98,9 @@ export function SheetPage() {
           selected={entries.find((entry) => entry.key === selected) ?? null}
           planning={planning}
           onPlanning={setPlanning}
+          listing={listing}
+          onListing={setListing}
           onGeometry={setGeometry}
-          onNote={noteOn}
           margin={(form) => (
             <Margin
               className={pane === 'margin' ? '' : 'max-tablet:hidden'}

@@ -27,6 +27,11 @@ export function useCanvasKeys(editor: Editor) {
         editor.run('select-items', { ids: event.shiftKey ? [...selection, item] : [item] });
         return;
       }
+      if (event.key === 'Enter' && !mod && editor.state.tool === 'select' && editor.state.selection.size === 1) {
+        event.preventDefault();
+        document.querySelector<HTMLElement>('[data-form] input, [data-form] select')?.focus();
+        return;
+      }
       if (mod && ['c', 'x', 'v'].includes(event.key.toLowerCase())) return;
       if (editor.key({ key: event.key, mod, shift: event.shiftKey, alt: event.altKey })) event.preventDefault();
     },

@@ -58,6 +58,11 @@ export function useCanvasPointer(editor: Editor, onCursor: (at: { readonly x: nu
           editor.pointerUp(pressOf(event));
           return;
         }
+        if (held.current === null && editor.state.ghost !== null) {
+          editor.pointerDown(pressOf(event));
+          editor.pointerUp(pressOf(event));
+          return;
+        }
         if (held.current !== event.pointerId) return;
         held.current = null;
         editor.pointerUp(pressOf(event));
