@@ -1,6 +1,7 @@
 import * as Y from 'yjs';
 import { admitUpdate, type RefusalReason } from '@/lib/document/admission/admit-update';
 import type { NackReason } from '@/realtime/protocol';
+import { ElectricalWatch } from './electrical-watch';
 
 export type Verdict =
   | { readonly ok: true; readonly electrical: boolean }
@@ -23,12 +24,12 @@ export function writersOf(update: Uint8Array): number[] | undefined {
  */
 export class SheetCandidate {
   private readonly doc: Y.Doc;
-  private hash: string;
+  private readonly watch: ElectricalWatch;
 
-  constructor(committed: Y.Doc, private readonly contentHash: (doc: Y.Doc) => string) {
+  constructor(committed: Y.Doc, contentHash: (doc: Y.Doc) => string) {
     this.doc = new Y.Doc();
     Y.applyUpdate(this.doc, Y.encodeStateAsUpdate(committed));
-    this.hash = contentHash(this.doc);
+    this.watch = new ElectricalWatch(this.doc, contentHash);
   }
 
   /** Tries one update. `mayWrite` says whose structs it may bring; deletions may name anyone's. */
@@ -40,9 +41,7 @@ export class SheetCandidate {
     }
     const admission = admitUpdate(this.doc, update);
     if (!admission.ok) return { ok: false, reason: nackReasonOf[admission.reason], words: admission.words };
-    const before = this.hash;
-    if (admission.changed) this.hash = this.contentHash(this.doc);
-    return { ok: true, electrical: this.hash !== before };
+    return { ok: true, electrical: admission.changed && this.watch.changed() };
   }
 
   destroy(): void {
