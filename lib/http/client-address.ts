@@ -1,8 +1,8 @@
 /**
- * The client's network address. With `trusted` proxies in front, the entry of `X-Forwarded-For` that the outermost of them
- * wrote; without any, the last entry, which our own web server put there from the socket.
+ * The client's network address from `X-Forwarded-For`, whose last entry our own server wrote from the socket (`socket-address.ts`).
+ * Each of `trusted` proxies in front wrote one entry before it; anything further left the client wrote and is not believed.
  */
 export function clientAddress(headers: Pick<Headers, 'get'>, trusted: number): string {
-  const entries = (headers.get('x-forwarded-for') ?? '').split(',').map((entry) => entry.trim()).filter((entry) => entry !== '');
-  return entries.at(-Math.max(1, trusted)) ?? entries[0] ?? 'unknown';
+  const hops = (headers.get('x-forwarded-for') ?? '').split(',').map((hop) => hop.trim()).filter((hop) => hop !== '');
+  return hops.at(-1 - Math.min(trusted, hops.length - 1)) ?? 'unknown';
 }
