@@ -19,6 +19,6 @@ export function noteSocketAddresses(): void {
   const emit = Server.prototype.emit;
   Server.prototype.emit = function noting(this: Server, event: string | symbol, ...args: unknown[]): boolean {
     if (event === 'request') appendSocketAddress(args[0] as IncomingMessage);
-    return emit.call(this, event, ...args);
+    return Reflect.apply(emit, this, [event, ...args]) as boolean;
   };
 }
