@@ -36,20 +36,21 @@ interface PersonGrantRow {
   readonly version: string;
 }
 
-const isMaker = sql`(${circuitMakers.id} is not null or ${circuits.postedBy} = ${people.id})`;
 const isArchived = sql`${circuits.archivedAt} is not null`;
-const version = sql`concat(${memberships.role}, '.', ${memberships.version}, if(${isMaker}, '.maker', '.-'), if(${isArchived}, '.archived', '.-'))`;
+const isMaker = (personId: string) => sql`(${circuitMakers.id} is not null or ${circuits.postedBy} = ${personId})`;
+const version = (personId: string) =>
+  sql`concat(${memberships.role}, '.', ${memberships.version}, if(${isMaker(personId)}, '.maker', '.-'), if(${isArchived}, '.archived', '.-'))`;
 
 /** The rows that give a person a part in a circuit: at most one; none when they have no grant. */
 function personGrantRows(roomId: string, personId: string, sessionId: string | null, now: Date): SQL {
+  const session = sessionId === null ? sql`` : sql`join ${sessions} on ${sessions.id} = ${sessionId} and ${sessions.userId} = ${personId}
+      and ${sessions.expiresAt} > ${now} and ${sessions.endsAt} > ${now}`;
   return sql`from ${circuits}
-    join ${people} on ${people.id} = ${personId}
-    join ${memberships} on ${memberships.benchId} = ${circuits.benchId} and ${memberships.personId} = ${people.id}
-    left join ${circuitMakers} on ${circuitMakers.circuitId} = ${circuits.id} and ${circuitMakers.personId} = ${people.id}
+    join ${memberships} on ${memberships.benchId} = ${circuits.benchId} and ${memberships.personId} = ${personId}
+    ${session}
+    left join ${circuitMakers} on ${circuitMakers.circuitId} = ${circuits.id} and ${circuitMakers.personId} = ${personId}
       and ${circuitMakers.standing} = 1
-    left join ${sessions} on ${sessions.id} = ${sessionId} and ${sessions.userId} = ${people.id}
-      and ${sessions.expiresAt} > ${now} and ${sessions.endsAt} > ${now}
-    where ${circuits.id} = ${roomId} and (${sessionId} is null or ${sessions.id} is not null)`;
+    where ${circuits.id} = ${roomId}`;
 }
 
 /**
@@ -57,14 +58,15 @@ function personGrantRows(roomId: string, personId: string, sessionId: string | n
  * transaction ends, so that nobody is removed between this look and the commit.
  */
 export function grantStands(roomId: string, personId: string, sessionId: string | null, expected: string, now = new Date()): SQL {
-  return sql`(select count(*) ${personGrantRows(roomId, personId, sessionId, now)} and ${version} = ${expected} lock in share mode)`;
+  return sql`(select count(*) ${personGrantRows(roomId, personId, sessionId, now)} and ${version(personId)} = ${expected} lock in share mode)`;
 }
 
 async function readPersonGrant(
   db: Executor, roomId: string, personId: string, sessionId: string | null, now: Date,
 ): Promise<RoomGrant | undefined> {
-  const [rows] = await db.execute(sql`select ${memberships.role} as role, ${isArchived} as archived, ${isMaker} as maker,
-    ${people.name} as name, ${version} as version ${personGrantRows(roomId, personId, sessionId, now)}`) as unknown as [PersonGrantRow[]];
+  const [rows] = await db.execute(sql`select ${memberships.role} as role, ${isArchived} as archived, ${isMaker(personId)} as maker,
+    (select ${people.name} from ${people} where ${people.id} = ${personId}) as name, ${version(personId)} as version
+    ${personGrantRows(roomId, personId, sessionId, now)}`) as unknown as [PersonGrantRow[]];
   const row = rows[0];
   return row && {
     benchRole: row.role, maker: Number(row.maker) === 1, archived: Number(row.archived) === 1, name: row.name, version: row.version,
