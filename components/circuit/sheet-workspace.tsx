@@ -55,40 +55,42 @@ export function SheetWorkspace({ editor, state, session, snapshot, pane, title, 
   const lit = useMemo(() => new Set((parts ?? []).filter((part) => part.ref !== '' && wanted.split(' ').includes(part.ref)).map((part) => part.id)), [parts, wanted]);
   const drawing = editor !== null && state !== null;
   return (
-    <div ref={area} className="relative flex min-w-0 flex-1 bg-film">
+    <div ref={area} className="flex min-w-0 flex-1 bg-film">
       {drawing && !state.readOnly ? <PartDrawer editor={editor} zigzag={zigzag} onZigzag={setZigzag} onTaken={toCanvas} /> : null}
-      <div className={pane === 'drawing' ? 'relative flex min-w-0 flex-1' : 'relative flex min-w-0 flex-1 max-tablet:hidden'}>
-        {drawing ? (
-          <>
-            <SheetCanvas
-              editor={editor}
-              state={state}
-              label={`Schematic, ${newest ? `draft after revision ${newest.letter}` : 'draft'}`}
-              volts={volts}
-              lit={lit}
-              others={snapshot?.others ?? []}
-              shown={shown ? `Shown at ${voltsWords(shown.volts)}` : undefined}
-              zigzag={zigzag}
-              onCursor={pointAt}
-              onGeometry={onGeometry}
-              titleBlock={[
-                { legend: 'Title', value: title, wide: true },
-                { legend: 'Drawn', value: newest ? shortName(newest.cutBy.name) : '' },
-                { legend: 'Date', value: newest ? <Moment at={newest.cutAt} form="day" /> : '' },
-                { legend: 'Revision', value: draftLetter(newest, moved), strong: true },
-              ]}
-            />
-            {state.sheet.parts.length === 0 && state.ghost === null && !state.readOnly ? <EmptySheet editor={editor} onTaken={toCanvas} /> : null}
-            {listing ? <CommandList editor={editor} onClose={() => { onListing(false); toCanvas(); }} /> : null}
-            <TwinTables sheet={state.sheet} onSelect={(id) => { editor.run('select-items', { ids: [id] }); }} />
-          </>
-        ) : (
-          <div aria-busy="true" className="drafting-grid m-6 flex-1 border-[1.5px] border-ink p-8 max-tablet:m-0">
-            {snapshot?.line.state === 'ended' ? <p role="alert" className="text-body text-stop-ink">{snapshot.line.why}</p> : <Skeleton className="w-40" />}
-          </div>
-        )}
+      <div className="relative flex min-w-0 flex-1">
+        <div className={pane === 'drawing' ? 'relative flex min-w-0 flex-1' : 'relative flex min-w-0 flex-1 max-tablet:hidden'}>
+          {drawing ? (
+            <>
+              <SheetCanvas
+                editor={editor}
+                state={state}
+                label={`Schematic, ${newest ? `draft after revision ${newest.letter}` : 'draft'}`}
+                volts={volts}
+                lit={lit}
+                others={snapshot?.others ?? []}
+                shown={shown ? `Shown at ${voltsWords(shown.volts)}` : undefined}
+                zigzag={zigzag}
+                onCursor={pointAt}
+                onGeometry={onGeometry}
+                titleBlock={[
+                  { legend: 'Title', value: title, wide: true },
+                  { legend: 'Drawn', value: newest ? shortName(newest.cutBy.name) : '' },
+                  { legend: 'Date', value: newest ? <Moment at={newest.cutAt} form="day" /> : '' },
+                  { legend: 'Revision', value: draftLetter(newest, moved), strong: true },
+                ]}
+              />
+              {state.sheet.parts.length === 0 && state.ghost === null && !state.readOnly ? <EmptySheet editor={editor} onTaken={toCanvas} /> : null}
+              {listing ? <CommandList editor={editor} onClose={() => { onListing(false); toCanvas(); }} /> : null}
+              <TwinTables sheet={state.sheet} onSelect={(id) => { editor.run('select-items', { ids: [id] }); }} />
+            </>
+          ) : (
+            <div aria-busy="true" className="drafting-grid m-6 flex-1 border-[1.5px] border-ink p-8 max-tablet:m-0">
+              {snapshot?.line.state === 'ended' ? <p role="alert" className="text-body text-stop-ink">{snapshot.line.why}</p> : <Skeleton className="w-40" />}
+            </div>
+          )}
+        </div>
+        {margin(drawing ? formOf({ editor, state, planning, onPlanning, onClosed: toCanvas }) : null)}
       </div>
-      {margin(drawing ? formOf({ editor, state, planning, onPlanning, onClosed: toCanvas }) : null)}
     </div>
   );
 }

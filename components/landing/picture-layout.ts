@@ -11,7 +11,7 @@ import type { Sheet } from '@/lib/document/records';
 export const pictureSize = { drawing: 448, margin: 330, height: 436 } as const;
 
 /** The part of the demo drawing that the picture shows: the switch, its coil, its gate and its indicator. */
-export const pictureView: View = { x: 533, y: 62, scale: 0.93 };
+export const pictureView: View = { x: 545, y: 62, scale: 0.9 };
 
 /** Height of an entry with its words, at the picture's width: about 50 letters a line of 18 px. */
 function heightOf(entry: FindingEntry): number {

@@ -42,7 +42,7 @@ export function ProductPicture({ sheet, check }: ProductPictureProps) {
       <div className="relative flex max-tablet:block" style={{ minHeight: pictureSize.height }}>
         <div className="drafting-grid flex-none overflow-hidden border-r border-ink max-tablet:border-r-0 max-tablet:border-b" style={{ width: pictureSize.drawing, maxWidth: '100%', height: pictureSize.height }}>
           <svg width={pictureSize.drawing} height={pictureSize.height} role="img" aria-label="Part of the schematic: a MOSFET with its gate network, an induction coil, its diode and an indicator" className="block">
-            <g transform={`scale(${pictureView.scale}) translate(${-pictureView.x} ${-pictureView.y})`}><SheetDrawing sheet={sheet} volts={check.volts} /></g>
+            <g transform={`scale(${pictureView.scale}) translate(${-pictureView.x} ${-pictureView.y})`}><SheetDrawing sheet={sheet} volts={check.volts} within={{ left: pictureView.x, top: pictureView.y, right: pictureView.x + pictureSize.drawing / pictureView.scale, bottom: pictureView.y + pictureSize.height / pictureView.scale }} /></g>
           </svg>
         </div>
         <div className="max-wide:hidden"><LeaderLines leaders={leaders} width={pictureSize.drawing + 24} height={pictureSize.height} /></div>

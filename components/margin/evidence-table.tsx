@@ -1,8 +1,9 @@
+import { monoWords } from '@/components/ui/mono-words';
 import { formatQuantity } from '@/lib/netlist/quantity/format-quantity';
 import type { Evidence } from '@/lib/netlist/findings/finding';
 
 function valueWords(value: Evidence['value'], unit: string): string {
-  return typeof value === 'number' ? formatQuantity(value, unit, 3) : String(value);
+  return typeof value === 'number' ? monoWords(formatQuantity(value, unit, 3)) : String(value);
 }
 
 /** The facts a verdict rests on: from these alone it can be computed again. */

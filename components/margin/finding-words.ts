@@ -17,7 +17,7 @@ export function splitMessage(message: string): { readonly head: string; readonly
 export function fromWords(finding: Finding, plan: readonly { readonly name: string; readonly volts: number }[]): string {
   const crossing = finding.evidence.find((evidence) => evidence.quantity === 'crossing' && typeof evidence.value === 'number');
   if (finding.holdPoint === null || plan.length === 0) return 'as drawn';
-  if (crossing && typeof crossing.value === 'number') return `from ${voltsWords(crossing.value)}`;
+  if (crossing && typeof crossing.value === 'number') return `from ${voltsWords(Number(crossing.value.toPrecision(3)))}`;
   if (finding.holdPoint === plan[0]?.name) return 'every hold point';
   const volts = finding.fromVolts === null ? finding.holdPoint : voltsWords(finding.fromVolts);
   return finding.holdPoint === plan.at(-1)?.name ? `at ${volts}` : `from ${volts}`;

@@ -23,20 +23,12 @@ export default async function BenchPage({ params }: BenchPageProps) {
     <div className="flex h-full flex-col overflow-hidden">
       <BenchBar bench={bench} person={caller.person} />
       <main className="flex min-h-0 flex-1 flex-col">
-        <div className="flex h-[78px] flex-none items-center gap-8 bg-panel px-5 max-tablet:hidden">
-          <div>
-            <p className="silk text-silk-2 font-medium">Bench</p>
-            <h1 className="font-cond text-[27px] leading-[1.15] font-semibold tracking-[.015em]">{bench.name}</h1>
-          </div>
-          <span className="flex-1" />
-          {may('post a circuit', bench.standing) ? <ButtonLink href={`/benches/${slug}/new`} tone="primary" size="large" icon="plus">New circuit</ButtonLink> : null}
-        </div>
-        <QueryProvider><BenchHome bench={slug} person={caller.person.id} /></QueryProvider>
+        <QueryProvider><BenchHome bench={slug} name={bench.name} person={caller.person.id} mayPost={may('post a circuit', bench.standing)} /></QueryProvider>
         {may('post a circuit', bench.standing) ? (
           <div className="flex-none border-t border-edge bg-panel p-2.5 tablet:hidden"><ButtonLink href={`/benches/${slug}/new`} tone="primary" size="large" icon="plus" className="w-full">New circuit</ButtonLink></div>
         ) : null}
       </main>
-      <StatusStrip lamp="ok" state={`You are ${bench.standing.role} here`} right="A sign-off is a peer’s review, not permission in law" />
+      <StatusStrip lamp="ok" state={`You are a ${bench.standing.role} here`} right="A sign-off is a peer’s review, not permission in law" />
     </div>
   );
 }
