@@ -33,14 +33,28 @@ function NetNameWords({ part }: { readonly part: PartRecord }) {
   );
 }
 
+/** Words of a net name on a line: above a level one, to the right of an upright one. */
+function ThroughWords({ part }: { readonly part: PartRecord }) {
+  const upright = part.turn === 90 || part.turn === 270;
+  return <text x={upright ? part.x + 7 : part.x} y={upright ? part.y + 4 : part.y - 6} textAnchor={upright ? 'start' : 'middle'} className="paint-film fill-ink-2 font-cond text-xs font-semibold tracking-[.06em]">{ownWords(part)}</text>;
+}
+
 /** The drawing of a kind; a sheet shows all of its resistors as rectangles or all as zigzags. */
 export function artOf(kind: PartRecord['kind'], zigzag: boolean): SymbolArt {
   const { symbol, alternatives } = kindRegistry[kind];
   return zigzag && kind === 'resistor' ? alternatives?.[0] ?? symbol : symbol;
 }
 
+interface PartViewProps {
+  readonly part: PartRecord;
+  readonly zigzag?: boolean;
+  /** A net name with a wire running through it: words beside the line and no stub. */
+  readonly through?: boolean;
+}
+
 /** One part where it stands on the sheet, without its words at the side. */
-export function PartView({ part, zigzag = false }: { readonly part: PartRecord; readonly zigzag?: boolean }) {
+export function PartView({ part, zigzag = false, through = false }: PartViewProps) {
+  if (through) return <ThroughWords part={part} />;
   if (part.kind === 'note') return <NoteView part={part} />;
   const pose = `translate(${part.x} ${part.y})${part.turn === 0 ? '' : ` rotate(${part.turn})`}${part.mirror ? ' scale(-1 1)' : ''}`;
   return (

@@ -21,6 +21,14 @@ const handleAt = (id: string, x: number, y: number, out: Point): NodeHandle => (
   position: out.x < 0 ? Position.Left : out.x > 0 ? Position.Right : out.y < 0 ? Position.Top : Position.Bottom,
 });
 
+/** Ends of wires on a part's node, from its left top. */
+export function handlesOf(part: PartRecord): readonly NodeHandle[] {
+  const box = nodeBoxOf(part);
+  return pinPlacesOf(part).map((pin) => handleAt(pin.pin, pin.x - box.left, pin.y - box.top, pin.out));
+}
+
+export const junctionHandles: readonly NodeHandle[] = [handleAt('j', 4, 4, { x: 1, y: 0 })];
+
 const partNodes = new WeakMap<PartRecord, PartNode>();
 
 /** Words by which parts and wires are called aloud, by id. */
@@ -35,7 +43,7 @@ function partNode(part: PartRecord, spoken: Spoken): PartNode {
   const [width, height] = [Math.max(1, box.right - box.left), Math.max(1, box.bottom - box.top)];
   const node: PartNode = {
     id: part.id, type: 'part', position: { x: box.left, y: box.top }, data: { part }, ariaLabel, domAttributes: { 'aria-roledescription': 'part' }, width, height, measured: { width, height },
-    handles: pinPlacesOf(part).map((pin) => handleAt(pin.pin, pin.x - box.left, pin.y - box.top, pin.out)),
+    handles: [...handlesOf(part)],
   };
   partNodes.set(part, node);
   return node;
@@ -49,7 +57,7 @@ function junctionNode(junction: JunctionRecord, wires: number): JunctionNode {
   const node: JunctionNode = {
     id: junction.id, type: 'junction', position: { x: junction.x - 4, y: junction.y - 4 }, data: { wires },
     width: 8, height: 8, measured: { width: 8, height: 8 }, focusable: false,
-    handles: [handleAt('j', 4, 4, { x: 1, y: 0 })],
+    handles: [...junctionHandles],
   };
   junctionNodes.set(junction, node);
   return node;

@@ -2,11 +2,13 @@
 import { memo } from 'react';
 import type { NodeProps } from 'reactflow';
 import { PartView } from '@/components/drawing/part-view';
+import { throughMarks } from '@/components/drawing/through-marks';
 import { pinPlacesOf } from '@/lib/document/geometry/pin-place';
 import type { PartRecord } from '@/lib/document/records';
 import { useCanvas, useEditorValue } from './canvas-context';
-import { nodeBoxOf, type PartNode } from './flow-records';
+import { handlesOf, nodeBoxOf, type PartNode } from './flow-records';
 import { LabelView } from './label-view';
+import { PinHandles } from './pin-handles';
 import { pinStates } from './pin-states';
 
 const quiet = new Set(['net-name', 'note']);
@@ -48,17 +50,21 @@ export const PartNodeView = memo(function PartNodeView({ data: { part } }: NodeP
   const { editor, lit, zigzag } = useCanvas();
   const chosen = useEditorValue(editor, (state) => state.selection.has(part.id));
   const lifted = useEditorValue(editor, (state) => part.ref !== '' && state.lifted.has(part.ref));
+  const through = useEditorValue(editor, (state) => throughMarks(state.sheet).has(part.id));
   const box = nodeBoxOf(part);
   return (
-    <svg width={box.right - box.left} height={box.bottom - box.top} className="pointer-events-none block overflow-visible" aria-hidden="true">
-      <g transform={`translate(${-box.left} ${-box.top})`}>
-        {lit.has(part.id) ? <circle cx={(box.left + box.right) / 2} cy={(box.top + box.bottom) / 2} r="34" className="fill-act-wash" /> : null}
-        <g opacity={lifted ? 0.35 : undefined} strokeDasharray={lifted ? '5 4' : undefined}><PartView part={part} zigzag={zigzag} /></g>
-        {lifted ? <text x={(box.left + box.right) / 2} y={box.top - 6} textAnchor="middle" className="paint-film fill-act font-cond text-xs font-semibold tracking-[.06em] uppercase">lifted</text> : null}
-        <PinMarks part={part} />
-        <LabelView part={part} />
-        {chosen ? <Chosen part={part} name={part.ref || part.id} /> : null}
-      </g>
-    </svg>
+    <>
+      <PinHandles handles={handlesOf(part)} />
+      <svg width={box.right - box.left} height={box.bottom - box.top} className="pointer-events-none block overflow-visible" aria-hidden="true">
+        <g transform={`translate(${-box.left} ${-box.top})`}>
+          {lit.has(part.id) ? <circle cx={(box.left + box.right) / 2} cy={(box.top + box.bottom) / 2} r="34" className="fill-act-wash" /> : null}
+          <g opacity={lifted ? 0.35 : undefined} strokeDasharray={lifted ? '5 4' : undefined}><PartView part={part} zigzag={zigzag} through={through} /></g>
+          {lifted ? <text x={(box.left + box.right) / 2} y={box.top - 6} textAnchor="middle" className="paint-film fill-act font-cond text-xs font-semibold tracking-[.06em] uppercase">lifted</text> : null}
+          <PinMarks part={part} />
+          <LabelView part={part} />
+          {chosen ? <Chosen part={part} name={part.ref || part.id} /> : null}
+        </g>
+      </svg>
+    </>
   );
 });

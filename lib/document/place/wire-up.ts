@@ -77,26 +77,30 @@ export function wireUp(netlist: Netlist, records: readonly PartRecord[], newId: 
   return { marks, wires, junctions };
 }
 
-/** A name stands on the longest level run of its net's lines; where there is no line, at the pin, turned away from the body. */
+/** Shortest level run that takes a name's words; a longer upright one is chosen before a shorter level one. In grid steps. */
+const roomForWords = 6;
+
+/** A name stands in the middle of a straight run of its net's lines, above a level one or beside an upright one; without a line, at the pin, turned away from the body. */
 function placeOfName(tree: Tree, taken: ReadonlyMap<Cell, WireEnd>): { readonly cell: Cell; readonly point: Point; readonly turn: Turn } {
-  let best: readonly Cell[] = [];
-  for (const path of tree.paths) {
-    for (const run of levelRuns(path, taken)) if (run.length > best.length) best = run;
-  }
-  const cell = best[Math.floor(best.length / 2)];
-  if (cell !== undefined) return { cell, point: pointOf(cell), turn: 0 };
+  const longest = (level: boolean) => tree.paths.flatMap((path) => straightRuns(path, taken, level))
+    .reduce<readonly Cell[]>((best, run) => (run.length > best.length ? run : best), []);
+  const [level, upright] = [longest(true), longest(false)];
+  const run = level.length >= roomForWords || level.length >= upright.length ? level : upright;
+  const cell = run[Math.floor(run.length / 2)];
+  if (cell !== undefined) return { cell, point: pointOf(cell), turn: run === level ? 0 : 90 };
   const pin = tree.pins[0] as PinPlace;
   return { cell: cellOf(pin), point: { x: pin.x, y: pin.y }, turn: turnFrom({ x: 1, y: 0 }, pin.out) };
 }
 
-/** Stretches of a path that run level and stand free of pins, corners and ends. */
-function levelRuns(path: readonly Cell[], taken: ReadonlyMap<Cell, WireEnd>): readonly (readonly Cell[])[] {
+/** Stretches of a path that run one way and stand free of pins, corners and ends. */
+function straightRuns(path: readonly Cell[], taken: ReadonlyMap<Cell, WireEnd>, level: boolean): readonly (readonly Cell[])[] {
   const runs: Cell[][] = [[]];
   path.forEach((cell, index) => {
     const before = path[index - 1];
     const after = path[index + 1];
-    const level = before !== undefined && after !== undefined && pointOf(before).y === pointOf(after).y;
-    if (level && !taken.has(cell)) runs.at(-1)?.push(cell);
+    const [from, to] = before === undefined || after === undefined ? [] : [pointOf(before), pointOf(after)];
+    const straight = from && to && (level ? from.y === to.y : from.x === to.x);
+    if (straight && !taken.has(cell)) runs.at(-1)?.push(cell);
     else if (runs.at(-1)?.length) runs.push([]);
   });
   return runs;
