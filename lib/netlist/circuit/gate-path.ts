@@ -6,8 +6,8 @@ import { terminalsOf } from './terminals';
 import { walk } from './walk';
 
 /** DC ohms from a stage's gate or base to its source or emitter with some parts taken out; Infinity without a path. */
-export const gateOhms = (circuit: Circuit, stage: Stage, gone: ReadonlySet<string> = new Set()): number =>
-  resistanceBetween(circuit.graph.edges, stage.terminals.control, stage.terminals.reference, gone);
+export const gateOhms = (stage: Stage, gone: ReadonlySet<string> = new Set()): number =>
+  resistanceBetween(stage.neighbourhood, stage.terminals.control, stage.terminals.reference, gone);
 
 /** What could drive a gate that has no DC path of its own. */
 export type Driver = 'pin' | 'transistors' | 'one transistor' | 'not examined' | 'junction' | 'nothing';

@@ -31,6 +31,8 @@ export interface Stage {
   /** Edges between drain or collector and the first rail. */
   readonly load: readonly Edge[];
   readonly inductive: boolean;
+  /** Edges around gate and source, up to the supplies' rails: all that can decide the gate's DC path, whatever is lifted. */
+  readonly neighbourhood: readonly Edge[];
 }
 
 const senseOhms = 10;
@@ -58,7 +60,27 @@ function loadOf(graph: Graph, rails: ReadonlySet<string>, start: string): readon
   return [...new Set(edges)];
 }
 
-function stageOf(graph: Graph, rails: ReadonlySet<string>, gates: ReadonlySet<string>, sources: Sources, transistor: NetlistPart): Stage {
+/** Nets that sources other than controls tie to 0 V: they stay rails when a control lets go. */
+function supplyRails(graph: Graph, { controls }: Sources): ReadonlySet<string> {
+  const driving = new Set(controls.map(({ part }) => part.id));
+  return new Set(walk(graph, '0', { through: (edge) => edge.nature === 'source' && !driving.has(edge.part.id) }).keys());
+}
+
+function neighbourhoodOf(graph: Graph, fixed: ReadonlySet<string>, { control, reference }: Terminals): readonly Edge[] {
+  const edges = new Set<Edge>();
+  for (const start of [control, reference]) {
+    if (fixed.has(start)) continue;
+    const steps = walk(graph, start, {
+      through: ({ nature }) => nature === 'resistor' || nature === 'joint' || nature === 'coil' || nature === 'source',
+      stopAt: (net) => fixed.has(net),
+    });
+    for (const net of steps.keys()) if (!fixed.has(net)) for (const edge of graph.edgesAt(net)) edges.add(edge);
+  }
+  for (const edge of graph.edges) if (edge.nature === 'source') edges.add(edge);
+  return [...edges];
+}
+
+function stageOf(graph: Graph, rails: ReadonlySet<string>, fixed: ReadonlySet<string>, gates: ReadonlySet<string>, sources: Sources, transistor: NetlistPart): Stage {
   const terminals = terminalsOf(transistor);
   const references = referencesOf(graph, rails, gates, terminals.reference);
   const reach = walk(graph, terminals.control, {
@@ -76,6 +98,7 @@ function stageOf(graph: Graph, rails: ReadonlySet<string>, gates: ReadonlySet<st
   const lower = loadOf(graph, rails, terminals.reference);
   return {
     transistor, terminals, reach, references, load,
+    neighbourhood: neighbourhoodOf(graph, fixed, terminals),
     control: ways[0]?.control ?? null,
     way: ways[0]?.way ?? [],
     pullDowns: near.flatMap((edge) => {
@@ -91,7 +114,8 @@ function stageOf(graph: Graph, rails: ReadonlySet<string>, gates: ReadonlySet<st
 export function findStages(graph: Graph, parts: readonly NetlistPart[], rails: ReadonlySet<string>, sources: Sources): readonly Stage[] {
   const transistors = parts.filter(isTransistor);
   const gates = new Set(transistors.map((part) => terminalsOf(part).control));
-  return transistors.map((transistor) => stageOf(graph, rails, gates, sources, transistor));
+  const fixed = supplyRails(graph, sources);
+  return transistors.map((transistor) => stageOf(graph, rails, fixed, gates, sources, transistor));
 }
 
 /** Leads, plug contacts and switches on a stage's way from gate to control. */

@@ -1,5 +1,6 @@
 import type { Circuit } from '../circuit/circuit';
-import { rmsOf, isAlternating } from '../circuit/source-role';
+import { isAlternating, rmsOf, roleOf } from '../circuit/source-role';
+import { isVoltageSource } from '../circuit/part-nature';
 import { quantityOf } from '../circuit/part-facts';
 import type { PartSetting } from '../kinds/kind-engine';
 import type { HoldPoint, NetlistPart, Scenario } from '../netlist';
@@ -44,8 +45,11 @@ function holdPointStation(circuit: Circuit, point: HoldPoint): Station {
   return { holdPoint: point.name, scenario: point.scenario ?? null, volts: point.volts, ambient: scenario?.ambient ?? roomTemperature, power, settings };
 }
 
-/** The source a plan raises when it names none: the only one whose role is supply or mains, or the only power source there is. */
-const planSource = (circuit: Circuit): NetlistPart | null => circuit.sources.power;
+/** The source a plan raises when it names none: the only one whose role is supply or mains. */
+function planSource({ netlist }: Circuit): NetlistPart | null {
+  const marked = netlist.parts.filter((part) => isVoltageSource(part) && (roleOf(part) === 'supply' || roleOf(part) === 'mains'));
+  return marked.length === 1 ? marked[0]! : null;
+}
 
 function drawnStation(circuit: Circuit, scenario: Scenario | undefined): Station {
   const { power } = circuit.sources;

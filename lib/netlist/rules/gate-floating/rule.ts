@@ -45,16 +45,16 @@ function whenReleased(circuit: Circuit, stage: Stage): Verdict | null {
   const name = stage.transistor.ref;
   const switches = stage.reach.size > 0 ? circuit.netlist.parts.filter((part) => part.kind === 'switch' && isClosed(part)) : [];
   const controls = circuit.sources.controls.map(({ part }) => part);
-  if (switches.length > 0 && !Number.isFinite(gateOhms(circuit, stage, new Set(switches.map((part) => part.id))))) {
+  if (switches.length > 0 && !Number.isFinite(gateOhms(stage, new Set(switches.map((part) => part.id))))) {
     return { severity: 'stop', state: 'as drawn', words: `${name} ${control} has no DC path to ${reference} once ${listWords(switches.map((part) => part.ref))} is open`, refs: switches.map((part) => part.ref) };
   }
   if (!isFet(stage.transistor) || !stage.control) return null;
-  if (Number.isFinite(gateOhms(circuit, stage, new Set(controls.map((part) => part.id))))) return null;
+  if (Number.isFinite(gateOhms(stage, new Set(controls.map((part) => part.id))))) return null;
   return { severity: 'caution', state: 'high-z', words: `${name} ${control} floats while ${stage.control.part.ref} is at high impedance: no resistor ties it to ${reference}`, refs: [stage.control.part.ref] };
 }
 
 function verdictOf(circuit: Circuit, stage: Stage): Verdict | 'not examined' | null {
-  if (Number.isFinite(gateOhms(circuit, stage))) return whenReleased(circuit, stage);
+  if (Number.isFinite(gateOhms(stage))) return whenReleased(circuit, stage);
   const driver = driverOf(circuit, stage);
   return driver === 'not examined' ? 'not examined' : undriven(stage, driver);
 }

@@ -1,5 +1,4 @@
 import type { LedBranch } from '../../circuit/led-branches';
-import { magnitudeOf, originOf } from '../../circuit/part-facts';
 import { unlimitedVolts } from '../../circuit/unlimited-path';
 import type { Control } from '../../circuit/sources';
 import { walk } from '../../circuit/walk';
@@ -7,7 +6,9 @@ import type { Outcome, Rule, RuleInput } from '../rule';
 import { needsTransient, voltsAcross } from '../support/alternating';
 import { ampsInto, branchRefs, branchTarget, ledAmps, ledLimitSource, weakestLed } from '../support/led-current';
 import { resizeRemedy } from '../support/led-resistor-choice';
+import { driverLimit } from '../support/driver-limit';
 import { atPoint, atStation, everywhere, missingFact } from '../support/outcome';
+import type { Rating } from '../support/rating';
 import { crossingEvidence, crossingVolts, judgeStress, refusalWords, stressEvidence, type StressLimit } from '../support/stress';
 import { placeWords, say } from '../support/words';
 
@@ -18,13 +19,13 @@ const parameters = {
 
 type Input = RuleInput<typeof parameters>;
 
-/** The controller pin that feeds a branch, when its current limit is given. */
-function pinOf({ circuit }: Input, branch: LedBranch): { readonly control: Control; readonly amps: number } | null {
+/** The control that feeds a branch straight, with what it can give. */
+function pinOf({ circuit }: Input, branch: LedBranch): { readonly control: Control; readonly limit: Rating } | null {
   for (const control of circuit.sources.controls) {
-    const amps = magnitudeOf(control.part, 'io_max');
-    if (amps === undefined) continue;
+    const limit = driverLimit(control);
+    if (!limit) continue;
     const reached = walk(circuit.graph, control.out, { through: ({ nature }) => nature === 'joint', stopAt: () => false });
-    if (branch.ends.some((net) => net !== '0' && reached.has(net))) return { control, amps };
+    if (branch.ends.some((net) => net !== '0' && reached.has(net))) return { control, limit };
   }
   return null;
 }
@@ -41,7 +42,7 @@ function branchOutcomes(input: Input, branch: LedBranch): readonly Outcome[] {
     { severity: 'caution', limit: amps, at: 'raised', source: ledLimitSource(led, 1) },
   ];
   const pin = pinOf(input, branch);
-  const pinLimits: readonly StressLimit[] = pin ? [{ severity: 'caution', limit: pin.amps * pinShare, at: 'stated', source: `${pinShare} × I maximum of ${pin.control.part.ref}, ${originOf(pin.control.part, 'io_max')}` }] : [];
+  const pinLimits: readonly StressLimit[] = pin ? [{ severity: 'caution', limit: pin.limit.value * pinShare, at: 'stated', source: `${pinShare} × ${pin.limit.source}` }] : [];
   const top = Math.max(0, ...points.ok.filter((point) => !point.staticOn).map((point) => branch.resistors.reduce((sum, part) => sum + Math.abs(voltsAcross(point, part) ?? 0), 0)));
   return points.stations.map((station) => {
     const verdict = judgeStress(points, station, ledAmps(led), limits, { heat: true });
@@ -58,9 +59,9 @@ function branchOutcomes(input: Input, branch: LedBranch): readonly Outcome[] {
     const atPin = pin ? judgeStress(points, station, (point) => Math.abs(ampsInto(point, pin.control.part, '+') ?? 0), pinLimits, { heat: true }) : null;
     if (pin && atPin?.severity) {
       return atPoint(atPin.point, {
-        ...base, outcome: 'fail', refs: [...branchRefs(branch), pin.control.part.ref], evidence: [stressEvidence(pin.control.part.ref, 'current', 'A', atPin)],
-        remedy: resizeRemedy(branch, top, Math.min(amps, pin.amps)),
-        message: `${pin.control.part.ref} gives ${say(atPin.value, 'A')} to ${led.ref} ${placeWords(atPin.point)}: more than ${pinShare * 100} % of its ${say(pin.amps, 'A')}`,
+        ...base, outcome: 'fail', confidence: pin.limit.source.endsWith('assumed') ? 'likely' : 'proven', refs: [...branchRefs(branch), pin.control.part.ref], evidence: [stressEvidence(pin.control.part.ref, 'current', 'A', atPin)],
+        remedy: resizeRemedy(branch, top, Math.min(amps, pin.limit.value)),
+        message: `${pin.control.part.ref} gives ${say(atPin.value, 'A')} to ${led.ref} ${placeWords(atPin.point)}: more than ${pinShare * 100} % of its ${say(pin.limit.value, 'A')}`,
       });
     }
     if (farOver) return atPoint(verdict.point, { ...base, outcome: 'not applicable', message: `${led.ref}: led-resistor-undersized speaks of it`, evidence: [] });

@@ -30,7 +30,7 @@ interface Lifted {
  */
 function ohmsWithout(circuit: Circuit, stage: Stage, lead: LeadGroup): number {
   const gone = new Set(lead.parts.map((part) => part.id));
-  const ohms = gateOhms(circuit, stage, gone);
+  const ohms = gateOhms(stage, gone);
   if (Number.isFinite(ohms)) return ohms;
   const reached = (start: string) => [...walk(circuit.graph, start, {
     through: (edge) => !gone.has(edge.part.id) && (edge.nature === 'resistor' || edge.nature === 'joint' || edge.nature === 'coil' || edge.nature === 'source'),
@@ -107,8 +107,10 @@ function resistiveOutcome(stage: Stage, { lead, ohms }: Lifted, values: Values):
 }
 
 function stageOutcomes(circuit: Circuit, stage: Stage, values: Values): readonly Outcome[] {
-  if (circuit.leads.length === 0 || !Number.isFinite(gateOhms(circuit, stage))) return [];
-  const lifted = circuit.leads.map((lead) => ({ lead, ohms: ohmsWithout(circuit, stage, lead) }));
+  const drawn = circuit.leads.length === 0 ? Infinity : gateOhms(stage);
+  if (!Number.isFinite(drawn)) return [];
+  const near = new Set(stage.neighbourhood.map(({ part }) => part.id));
+  const lifted = circuit.leads.map((lead) => ({ lead, ohms: lead.parts.some((part) => near.has(part.id)) ? ohmsWithout(circuit, stage, lead) : drawn }));
   const open = lifted.filter(({ ohms }) => !Number.isFinite(ohms));
   const off = offVolts(stage, values)?.volts ?? 1;
   if (open.length > 0) return [openOutcome(circuit, stage, open.map(({ lead }) => lead), off, isFet(stage.transistor) ? values.cautionShare : values.cautionShare / values.stopShare)];
