@@ -1,4 +1,4 @@
-import { isOutage } from '@/db/errors';
+import { isDeadlock, isOutage } from '@/db/errors';
 import { Problem } from '@/lib/errors/problem';
 import { problemDetails } from '@/lib/errors/problem-details';
 import { logger } from '@/lib/log/logger';
@@ -27,5 +27,5 @@ export function respondProblem(error: unknown, requestId: string): Response {
 
 function foreseen(error: unknown): Problem {
   if (error instanceof Problem) return error;
-  return isOutage(error) ? new Problem('unavailable', undefined, { retryAfter: 2 }) : new Problem('internal');
+  return isOutage(error) || isDeadlock(error) ? new Problem('unavailable', undefined, { retryAfter: 2 }) : new Problem('internal');
 }

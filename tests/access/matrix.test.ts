@@ -27,7 +27,9 @@ describe('the matrix', () => {
   });
 
   it('covers every route file, and every call has its handler', async () => {
-    expect([...new Set(surface.map(routeFileOf))].sort()).toEqual(routeFiles().sort());
+    // The catch-all answers 404 to addresses that are none.
+    const files = routeFiles().filter((file) => !file.includes('[...rest]'));
+    expect([...new Set(surface.map(routeFileOf))].sort()).toEqual(files.sort());
     for (const operation of surface) await expect(handlerOf(operation)).resolves.toBeTypeOf('function');
   });
 });
