@@ -21,7 +21,7 @@ export function ToolStrip({ editor, onCommands }: { readonly editor: Editor; rea
   const canRedo = useEditorValue(editor, (state) => state.canRedo && !state.readOnly);
   const shown = strip.filter((one) => !readOnly || one.tool === 'select' || one.tool === 'lift');
   return (
-    <div className="flex items-center gap-2 max-tablet:hidden">
+    <section aria-label="Drawing" className="flex items-center gap-2 max-tablet:hidden">
       <div role="toolbar" aria-label="Tools" className="inline-flex">
         {shown.map((one) => (
           <button
@@ -48,6 +48,6 @@ export function ToolStrip({ editor, onCommands }: { readonly editor: Editor; rea
         </>
       )}
       <IconButton icon="bars" tone="plain" label="All commands and keys" onClick={onCommands} />
-    </div>
+    </section>
   );
 }
