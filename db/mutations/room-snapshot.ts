@@ -1,7 +1,7 @@
-import { and, desc, eq, lt, lte } from 'drizzle-orm';
+import { and, desc, eq, lt, lte, sql } from 'drizzle-orm';
 import type { Database, Transaction } from '../client';
 import { snapshotChecksum } from '../queries/room-checksum';
-import { rtSnapshot, rtUpdate } from '../schema/room';
+import { rtInstance, rtSnapshot, rtUpdate } from '../schema/room';
 
 /** One part of a snapshot in bytes; well under MariaDB's default packet of 16 MiB. */
 const partBytes = 4 * 1024 * 1024;
@@ -27,6 +27,11 @@ export async function forgetCoveredRows(db: Database, roomId: string): Promise<v
       .where(eq(rtSnapshot.roomId, roomId)).orderBy(desc(rtSnapshot.uptoSeq)).limit(snapshotsKept);
     const oldest = newest.at(-1);
     if (newest.length < snapshotsKept || !oldest) return;
+    // What a resend is told apart by outlives the rows it stands in.
+    await tx.execute(sql`insert into ${rtInstance} (room_id, instance_id, person_id, last_client_seq, last_seq)
+      select room_id, instance_id, max(actor_id), max(client_seq), max(seq) from ${rtUpdate}
+      where room_id = ${roomId} and seq <= ${oldest.seq} group by room_id, instance_id
+      on duplicate key update last_client_seq = greatest(last_client_seq, values(last_client_seq)), last_seq = greatest(last_seq, values(last_seq))`);
     await tx.delete(rtUpdate).where(and(eq(rtUpdate.roomId, roomId), lte(rtUpdate.seq, oldest.seq)));
     await tx.delete(rtSnapshot).where(and(eq(rtSnapshot.roomId, roomId), lt(rtSnapshot.uptoSeq, oldest.seq)));
   });

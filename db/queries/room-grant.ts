@@ -57,7 +57,9 @@ function personGrantRows(roomId: string, personId: string, sessionId: string | n
  * An SQL number: 1 while the person's grant is `expected`, else 0. The rows it rests on stay as they are until the
  * transaction ends, so that nobody is removed between this look and the commit.
  */
-export function grantStands(roomId: string, personId: string, sessionId: string | null, expected: string, now = new Date()): SQL {
+export function grantStands(
+  roomId: string, { personId, sessionId }: Extract<RoomActor, { personId: string }>, expected: string, now = new Date(),
+): SQL {
   return sql`(select count(*) ${personGrantRows(roomId, personId, sessionId, now)} and ${version(personId)} = ${expected} lock in share mode)`;
 }
 

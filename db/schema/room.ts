@@ -54,7 +54,7 @@ export const rtSnapshot = mysqlTable('rt_snapshot', {
   createdAt: createdAt(),
 }, (table) => [primaryKey({ columns: [table.roomId, table.uptoSeq, table.part] })]);
 
-/** How far each browser copy is committed: a resend stays idempotent after its rows are compacted away. */
+/** How far each browser copy was committed when its rows were compacted away: a resend stays idempotent. */
 export const rtInstance = mysqlTable('rt_instance', {
   roomId: ulidColumn('room_id').notNull(),
   instanceId: exactText('instance_id', { length: 80 }).notNull(),
