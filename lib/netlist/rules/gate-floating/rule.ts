@@ -71,7 +71,7 @@ function stageOutcome(circuit: Circuit, stage: Stage, values: Values): Outcome {
   return everywhere({
     ...base, outcome: 'fail', severity: verdict.severity, state: verdict.state, confidence: verdict.confidence ?? 'proven',
     refs: [transistor.ref, ...(verdict.refs ?? [])], message: verdict.words, evidence: [paths(0)],
-    remedy: pullDownRemedy(stage, { leakage: leakageOf(stage).amps, volts: threshold * values.thresholdShare }),
+    remedy: pullDownRemedy(circuit, stage, { leakage: leakageOf(stage).amps, volts: threshold * values.thresholdShare }),
   });
 }
 

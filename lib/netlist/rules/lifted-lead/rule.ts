@@ -57,7 +57,7 @@ function openOutcome(circuit: Circuit, stage: Stage, leads: readonly LeadGroup[]
     target: { transistor: [transistor.id] }, refs: [...names.slice(0, 2), transistor.ref, ...far.slice(0, 1)], nets: [terminals.control],
     message: `${listWords(names).replace(' and ', ' or ')} lifted: ${transistor.ref} ${control} has no DC path to ${reference}${far.length > 0 ? `; ${far[0]} comes off with the lead` : ''}`,
     evidence: [{ entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'DC paths', value: 0, unit: '', source: `connections with ${names[0] ?? ''} lifted`, limit: 1, limitSource: `an undriven ${control} must be held off` }],
-    remedy: pullDownRemedy(stage, { leakage: leakageOf(stage).amps, volts: off * cautionShare }),
+    remedy: pullDownRemedy(circuit, stage, { leakage: leakageOf(stage).amps, volts: off * cautionShare }),
   });
 }
 
@@ -78,7 +78,7 @@ function withstands(stage: Stage, ohms: number, volts: number): readonly Evidenc
   return [{ entity: stage.transistor.ref, quantity: 'bus rise withstood', value: volts / (ohms * crss), unit: 'V/s', source: `V_GS(th) minimum / (${say(ohms, 'Ω')} × C_rss)` }];
 }
 
-function resistiveOutcome(stage: Stage, { lead, ohms }: Lifted, values: Values): Outcome {
+function resistiveOutcome(circuit: Circuit, stage: Stage, { lead, ohms }: Lifted, values: Values): Outcome {
   const { transistor, terminals } = stage;
   const { control, reference } = terminalWords(stage);
   const base = { severity: 'stop' as Severity, target: { transistor: [transistor.id] }, refs: [...stage.pullDowns.slice(0, 1).map(({ part }) => part.ref), transistor.ref, lead.name], nets: [terminals.control], state: `lifted ${lead.name}` as const };
@@ -102,7 +102,7 @@ function resistiveOutcome(stage: Stage, { lead, ohms }: Lifted, values: Values):
   return everywhere({
     ...base, outcome: 'fail', severity, confidence, evidence,
     message: `${lead.name} lifted: ${say(leakage.amps, 'A')} of leakage${leakage.assumed ? ' (assumed)' : ''} through ${say(ohms, 'Ω')} lifts ${transistor.ref} ${control} to ${say(volts, 'V')}; it is on from ${say(off.volts, 'V')}`,
-    remedy: pullDownRemedy(stage, { leakage: leakage.amps, volts: cautionAt }),
+    remedy: pullDownRemedy(circuit, stage, { leakage: leakage.amps, volts: cautionAt }),
   });
 }
 
@@ -115,7 +115,7 @@ function stageOutcomes(circuit: Circuit, stage: Stage, values: Values): readonly
   const off = offVolts(stage, values)?.volts ?? 1;
   if (open.length > 0) return [openOutcome(circuit, stage, open.map(({ lead }) => lead), off, isFet(stage.transistor) ? values.cautionShare : values.cautionShare / values.stopShare)];
   const worst = lifted.reduce((a, b) => (b.ohms > a.ohms ? b : a));
-  return [resistiveOutcome(stage, worst, values)];
+  return [resistiveOutcome(circuit, stage, worst, values)];
 }
 
 export const liftedLead: Rule<typeof parameters> = {

@@ -1,6 +1,6 @@
 import { isInternal, isTransistor } from '../../circuit/part-nature';
 import type { Remedy } from '../../findings/finding';
-import type { Net, NetlistPart } from '../../netlist';
+import type { Net, Netlist, NetlistPart } from '../../netlist';
 import { pinReference } from '../../connectivity/pin-reference';
 import { kindOf } from '../../kinds/kind-registry';
 import type { Outcome, Rule, RuleInput } from '../rule';
@@ -34,7 +34,7 @@ function remedyOf({ part, pin }: Lone): Remedy {
   return { words: `Join ${pinReference(part, pin)}, or mark it left open if that is meant.`, edits: [{ edit: 'leave open', part: part.ref, pin }] };
 }
 
-function judge(lone: Lone, leastPins: number): Outcome {
+function judge(netlist: Netlist, lone: Lone, leastPins: number): Outcome {
   const { net, part, pin } = lone;
   const reference = pinReference(part, pin);
   const base = {
@@ -42,7 +42,7 @@ function judge(lone: Lone, leastPins: number): Outcome {
     evidence: [{ entity: net.name, quantity: 'pins', value: net.pins.length, unit: '', source: 'sheet', limit: leastPins, limitSource: 'a net joins at least two pins' }],
   } as const;
   if (part.leftOpen.includes(pin)) return everywhere({ ...base, outcome: 'pass', message: `${reference} is left open on purpose`, evidence: [{ entity: reference, quantity: 'left open', value: true, unit: '', source: 'sheet' }] });
-  const named = net.givenNames.length > 0 || net.name === '0' ? ` on ${netWords(net.name)}` : '';
+  const named = net.givenNames.length > 0 || net.name === '0' ? ` on ${netWords(netlist, net.name)}` : '';
   return everywhere({ ...base, outcome: 'fail', message: `${reference}${named} is joined to nothing else`, remedy: remedyOf(lone) });
 }
 
@@ -51,5 +51,5 @@ export const lonePin: Rule<typeof parameters> = {
   check: (input) => input.netlist.nets
     .filter((net) => net.pins.length > 0 && net.pins.length < input.parameters.leastPins)
     .flatMap((net) => loneOf(input, net) ?? [])
-    .map((lone) => judge(lone, input.parameters.leastPins)),
+    .map((lone) => judge(input.netlist, lone, input.parameters.leastPins)),
 };

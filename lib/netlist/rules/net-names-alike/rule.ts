@@ -1,7 +1,6 @@
 import type { Net } from '../../netlist';
 import type { Outcome, Rule, RuleInput } from '../rule';
 import { everywhere } from '../support/outcome';
-import { netWords } from '../support/words';
 import { areAliases, areMistyped } from './likeness';
 
 const parameters = {
@@ -57,7 +56,7 @@ function judge(pair: Pair): Outcome {
 function clear(net: Net): Outcome {
   return everywhere({
     outcome: 'pass', severity: 'caution', confidence: 'likely', target: { net: [net.name] }, refs: [], nets: [net.name],
-    message: `No other net has a name like ${netWords(net.name)}`,
+    message: `No other net has a name like ${net.name === '0' ? '0 V' : net.name}`,
     evidence: [{ entity: net.name, quantity: 'told apart by name', value: true, unit: '', source: 'sheet' }],
   });
 }

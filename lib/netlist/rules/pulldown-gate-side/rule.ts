@@ -1,3 +1,4 @@
+import type { Circuit } from '../../circuit/circuit';
 import { acrossFrom } from '../../circuit/graph';
 import { magnitudeOf, originOf } from '../../circuit/part-facts';
 import { isFet, isRemovable } from '../../circuit/part-nature';
@@ -29,7 +30,7 @@ function driverSide(stage: Stage, net: string): string {
   return at;
 }
 
-function pullDownOutcome(stage: Stage, pullDown: PullDown, values: Values): Outcome | null {
+function pullDownOutcome({ netlist }: Circuit, stage: Stage, pullDown: PullDown, values: Values): Outcome | null {
   const { transistor, control } = stage;
   const front = frontOf(stage, pullDown.net);
   const resistors = front.filter((edge) => edge.nature === 'resistor');
@@ -53,12 +54,12 @@ function pullDownOutcome(stage: Stage, pullDown: PullDown, values: Values): Outc
   return everywhere({
     ...base, outcome: 'fail', severity, state: 'high', evidence,
     message: `Move ${pullDown.part.ref} to the driver’s side of ${resistors[0]!.part.ref}: there ${say(full, 'V')} becomes ${say(drive, 'V')}${starves ? `, and ${transistor.ref} wants ${say(spec ?? 0, 'V')}` : ''}`,
-    remedy: { words: `Move ${pullDown.part.ref} from ${netWords(pullDown.net)} to ${netWords(net)}.`, edits: [{ edit: 'move pin', part: pullDown.part.ref, pin: pullDown.pin, net }] },
+    remedy: { words: `Move ${pullDown.part.ref} from ${netWords(netlist, pullDown.net)} to ${netWords(netlist, net)}.`, edits: [{ edit: 'move pin', part: pullDown.part.ref, pin: pullDown.pin, net }] },
   });
 }
 
 export const pulldownGateSide: Rule<typeof parameters> = {
   id: 'pulldown-gate-side', version: 1, title: 'Pull-down on the gate’s side of the series resistor', severity: 'caution', needs: 'topology', parameters,
   check: ({ circuit, parameters: values }) => circuit.stages.filter((stage) => isFet(stage.transistor))
-    .flatMap((stage) => stage.pullDowns.flatMap((pullDown) => pullDownOutcome(stage, pullDown, values) ?? [])),
+    .flatMap((stage) => stage.pullDowns.flatMap((pullDown) => pullDownOutcome(circuit, stage, pullDown, values) ?? [])),
 };

@@ -1,6 +1,8 @@
+import type { Circuit } from '../../circuit/circuit';
 import type { Stage } from '../../circuit/stages';
 import { acrossFrom, type Edge } from '../../circuit/graph';
 import { ohmsOf, isRemovable } from '../../circuit/part-nature';
+import { leadName } from '../../circuit/leads';
 import { magnitudeOf } from '../../circuit/part-facts';
 import type { Remedy } from '../../findings/finding';
 import { decadeOf } from '../../series/preferred-values';
@@ -64,15 +66,15 @@ export function chooseOhms(stage: Stage, net: string, { leakage, volts, below = 
 }
 
 /** Proposed pull-down of a stage; words where no ordinary value fits. */
-export function pullDownRemedy(stage: Stage, need: PullDownNeed): Remedy {
+export function pullDownRemedy({ netlist }: Circuit, stage: Stage, need: PullDownNeed): Remedy {
   const net = pullDownNet(stage);
   const { reference } = stage.terminals;
   const ohms = chooseOhms(stage, net, need);
   const breaks = stage.way.map((edge) => edge.part).filter((part) => isRemovable(part) || part.kind === 'switch');
-  const side = breaks.length > 0 ? `, on the gate’s side of ${listWords([...new Set(breaks.map((part) => part.ref))])}` : '';
+  const side = breaks.length > 0 ? `, on the gate’s side of ${listWords([...new Set(breaks.map(leadName))])}` : '';
   if (ohms === undefined) return { words: `Hold ${stage.transistor.ref} off with a driver of its own: no single resistor is weak enough for this drive and strong enough for its leakage.` };
   return {
-    words: `Add ${say(ohms, 'Ω')} from ${netWords(net)} to ${netWords(reference)}${side}: undefined then means off.`,
+    words: `Add ${say(ohms, 'Ω')} from ${netWords(netlist, net)} to ${netWords(netlist, reference)}${side}: undefined then means off.`,
     edits: [{ edit: 'add part', kind: 'resistor', facts: { value: ohms, pmax: 0.25 }, pins: { 1: net, 2: reference } }],
   };
 }
