@@ -75,6 +75,7 @@ describe('asking for review', () => {
   it('puts it in review, supersedes older unsigned ones, and asked twice answers the first', async () => {
     const a = await inReview();
     expect(a.state).toBe('in review');
+    expect(await world.call(here.maker, askCall, { params: { id: a.id } })).toMatchObject({ status: 200, body: { id: a.id } });
     expect(await ask(a.id)).toMatchObject({ status: 200, body: { id: a.id } });
     await changeValue(world, here.maker, here.circuit, 2_200);
     const b = await inReview();
