@@ -5,7 +5,7 @@ import { indexOf } from '@/lib/document/geometry/sheet-index';
 import { wirePath } from '@/lib/document/geometry/wire-path';
 import type { PartRecord, Sheet } from '@/lib/document/records';
 import { netOfLines } from './hot-wires';
-import { placeLabels } from './label-places';
+import { netNameBox, placeLabels } from './label-places';
 import { zoneOf } from './zones';
 
 /** What part of the sheet is on the screen: sheet units of its left top, and pixels a unit. */
@@ -15,17 +15,25 @@ export interface View {
   readonly scale: number;
 }
 
+/** Places on a symbol's outline and leads where a leader may end, the best first; several, so that one is clear of words. */
 function endsOfPart(part: PartRecord): readonly Point[] {
   const box = partBoxOf(part);
   const middle = (box.top + box.bottom) / 2;
   const centre = (box.left + box.right) / 2;
   const pins = pinPlacesOf(part);
-  if (pins.length === 1) return [{ x: box.right, y: middle }, { x: centre, y: box.top }, { x: part.x, y: part.y }];
-  const body = Math.min(9, (box.right - box.left) / 2);
-  const upright = pins.length > 0 && pins.every((pin) => pin.out.y !== 0);
-  return upright
-    ? [{ x: centre + body, y: middle }, { x: centre + body, y: middle + 12 }, { x: centre + body, y: middle - 12 }]
-    : [{ x: centre, y: box.bottom }, { x: centre, y: box.top }, { x: box.right, y: middle }];
+  if (pins.length === 1) return [{ x: box.right, y: middle }, { x: centre, y: box.top }, { x: box.left, y: middle }, { x: part.x, y: part.y }];
+  if (pins.length > 0 && pins.every((pin) => pin.out.y !== 0)) {
+    const lead = (box.bottom - box.top) / 2 - 9;
+    return [
+      { x: box.right, y: middle }, { x: centre, y: middle + lead }, { x: centre, y: middle - lead },
+      { x: box.left, y: middle }, { x: box.right, y: middle + 8 }, { x: box.right, y: middle - 8 },
+    ];
+  }
+  if (pins.length > 0 && pins.every((pin) => pin.out.x !== 0)) {
+    const lead = (box.right - box.left) / 2 - 8;
+    return [{ x: centre, y: box.bottom }, { x: centre, y: box.top }, { x: centre + lead, y: middle }, { x: centre - lead, y: middle }];
+  }
+  return [{ x: box.right, y: middle }, ...pins.map((pin) => ({ x: pin.x - pin.out.x * 8, y: pin.y - pin.out.y * 8 }))];
 }
 
 function endsOfNet(sheet: Sheet, name: string): readonly Point[] {

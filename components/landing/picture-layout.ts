@@ -1,7 +1,7 @@
 import { drawingBounds } from '@/components/drawing/drawing-bounds';
 import { ReadingGeometry, type View } from '@/components/drawing/reading-geometry';
 import { layOutColumn } from '@/components/margin/column-layout';
-import { routeLeaders } from '@/components/margin/leaders';
+import { routeLeaders, settleTops } from '@/components/margin/leaders';
 import type { DrawnLeader } from '@/components/margin/leader-lines';
 import type { FindingEntry } from '@/components/margin/margin-entry';
 import { splitMessage } from '@/components/margin/finding-words';
@@ -33,8 +33,11 @@ export function layOutPicture(sheet: Sheet, entries: readonly FindingEntry[]): {
     const target = entry.anchor === null ? null : geometry.targetOf(entry.anchor);
     return target ? [[entry.key, target] as const] : [];
   }));
-  const { tops } = layOutColumn(entries.map((entry) => ({ key: entry.key, y: targets.get(entry.key)?.ends[0]?.y ?? null, height: heightOf(entry) })), pictureSize.height, 10);
+  const column = layOutColumn(entries.map((entry) => ({ key: entry.key, y: targets.get(entry.key)?.ends[0]?.y ?? null, height: heightOf(entry) })), pictureSize.height, 10);
+  const view = { of: targets, texts: geometry.texts(), ...extent };
+  const stacked = entries.map((entry) => ({ key: entry.key, top: column.tops.get(entry.key) ?? 0, height: heightOf(entry) })).sort((a, b) => a.top - b.top);
+  const tops = settleTops(stacked, view, 0, pictureSize.height, 10);
   const placed = entries.map((entry) => ({ entry, top: tops.get(entry.key) ?? 0 })).filter(({ entry, top }) => top + heightOf(entry) <= pictureSize.height + 8).sort((a, b) => a.top - b.top);
-  const leaders = routeLeaders(placed.map(({ entry, top }) => ({ key: entry.key, kind: entry.kind, on: false, top })), { of: targets, texts: geometry.texts(), ...extent }, 0);
+  const leaders = routeLeaders(placed.map(({ entry, top }) => ({ key: entry.key, kind: entry.kind, on: false, top })), view, 0);
   return { placed, leaders };
 }

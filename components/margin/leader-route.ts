@@ -28,31 +28,60 @@ export function crossesBox(a: Place, b: Place, box: Box): boolean {
   });
 }
 
-function crossings(leader: Leader, texts: readonly Box[], others: readonly Leader[]): number {
-  const { from, bend, end } = leader;
-  const text = texts.filter((box) => crossesBox(from, bend, box) || crossesBox(bend, end, box)).length;
-  const lines = others.filter((other) =>
-    segmentsCross(from, bend, other.bend, other.end) || segmentsCross(bend, end, other.from, other.bend) || segmentsCross(bend, end, other.bend, other.end)).length;
-  return text * 4 + lines;
+/** Texts that the level run at height `y` between two places would cross. */
+function levelTexts(texts: readonly Box[], y: number, left: number, right: number): number {
+  let count = 0;
+  for (const box of texts) if (y > box.top && y < box.bottom && box.right > left && box.left < right) count += 1;
+  return count;
 }
 
-const step = 24;
+function slantTexts(texts: readonly Box[], a: Place, b: Place): number {
+  const left = Math.min(a.x, b.x);
+  const right = Math.max(a.x, b.x);
+  const top = Math.min(a.y, b.y);
+  const bottom = Math.max(a.y, b.y);
+  let count = 0;
+  for (const box of texts) {
+    if (box.right < left || box.left > right || box.bottom < top || box.top > bottom) continue;
+    if (crossesBox(a, b, box)) count += 1;
+  }
+  return count;
+}
+
+function crossedLeaders(leader: Leader, others: readonly Leader[]): number {
+  const { from, bend, end } = leader;
+  return others.filter((other) =>
+    segmentsCross(from, bend, other.bend, other.end) || segmentsCross(bend, end, other.from, other.bend) || segmentsCross(bend, end, other.bend, other.end)).length;
+}
+
+const step = 20;
+
+export interface RoutedLeader {
+  readonly leader: Leader;
+  /** Texts that it crosses; 0 wherever there is a way round. */
+  readonly texts: number;
+}
 
 /**
  * Routes one leader from the column at `from` to one of `ends`: level, one bend, then straight. Of all bends on the level
- * run, and all ends, the one that crosses no text wins, then the one that crosses fewest leaders, then the shortest level run
- * over the sheet.
+ * run, and all ends, the one that crosses no text wins, then the one that crosses fewest leaders, then the shortest one.
  */
-export function routeLeader(from: Place, ends: readonly Place[], texts: readonly Box[], others: readonly Leader[]): Leader | null {
-  let best: { readonly leader: Leader; readonly cost: number } | null = null;
-  ends.forEach((end, rank) => {
-    const nearest = Math.max(end.x + 6, Math.min(end.x + 12, from.x));
-    for (let x = from.x - 10; x >= Math.min(nearest, from.x - 10); x -= step) {
-      const leader: Leader = { from, bend: { x, y: from.y }, end };
+export function routeLeader(from: Place, ends: readonly Place[], texts: readonly Box[], others: readonly Leader[]): RoutedLeader | null {
+  let best: (RoutedLeader & { readonly cost: number }) | null = null;
+  for (const [rank, end] of ends.entries()) {
+    const nearest = Math.min(from.x - 10, end.x + 10);
+    for (let x = from.x - 10; x >= nearest; x -= step) {
       const slope = Math.abs(end.y - from.y) / Math.max(1, x - end.x);
-      const cost = crossings(leader, texts, others) * 1_000 + Math.hypot(x - end.x, from.y - end.y) * 0.1 + (from.x - x) * 0.12 + (slope > 4 ? 40 : 0) + rank * 15;
-      if (best === null || cost < best.cost) best = { leader, cost };
+      const length = Math.hypot(x - end.x, from.y - end.y) * 0.1 + (from.x - x) * 0.12 + (slope > 4 ? 40 : 0) + rank * 15;
+      if (best !== null && length >= best.cost) continue;
+      const bend = { x, y: from.y };
+      const crossed = levelTexts(texts, from.y, x, from.x) + slantTexts(texts, bend, end);
+      const cost = length + crossed * 4_000;
+      if (best !== null && cost >= best.cost) continue;
+      const leader: Leader = { from, bend, end };
+      const full = cost + crossedLeaders(leader, others) * 1_000;
+      if (best === null || full < best.cost) best = { leader, texts: crossed, cost: full };
     }
-  });
-  return (best as { readonly leader: Leader } | null)?.leader ?? null;
+  }
+  return best;
 }

@@ -2,6 +2,7 @@ import { ruleOffset } from './column-layout';
 import { routeLeader, type Leader } from './leader-route';
 import type { DrawnLeader } from './leader-lines';
 import type { EntryKind } from './margin-entry';
+import type { Place } from './sheet-geometry';
 import type { Targets } from './use-targets';
 
 interface LeaderWanted {
@@ -12,19 +13,55 @@ interface LeaderWanted {
   readonly top: number;
 }
 
+function visibleEnds(targets: Targets, key: string): readonly Place[] {
+  return targets.of.get(key)?.ends.filter((end) => end.x >= 0 && end.x <= targets.width && end.y >= 0 && end.y <= targets.height) ?? [];
+}
+
 /** Leaders of all entries that are in view at both ends, from the top down, so that later ones avoid earlier ones. */
 export function routeLeaders(wanted: readonly LeaderWanted[], targets: Targets, columnTop: number): readonly DrawnLeader[] {
   const routed: DrawnLeader[] = [];
   const level: Leader[] = [];
   for (const entry of [...wanted].sort((a, b) => a.top - b.top)) {
-    const target = targets.of.get(entry.key);
     const y = entry.top + ruleOffset + 0.5;
-    if (!target || y < columnTop || y > targets.height) continue;
-    const ends = target.ends.filter((end) => end.x >= 0 && end.x <= targets.width && end.y >= 0 && end.y <= targets.height);
-    const leader = routeLeader({ x: targets.width, y }, ends, targets.texts, level);
+    if (y < columnTop || y > targets.height) continue;
+    const leader = routeLeader({ x: targets.width, y }, visibleEnds(targets, entry.key), targets.texts, level)?.leader;
     if (!leader) continue;
     level.push(leader);
     routed.push({ ...leader, from: { x: targets.width + 12, y }, key: entry.key, kind: entry.kind, on: entry.on });
   }
   return routed;
+}
+
+interface Standing {
+  readonly key: string;
+  readonly top: number;
+  readonly height: number;
+}
+
+/** How far an entry may leave its level to spare a text, px, nearest first. */
+const shifts = [0, -14, 14, -28, 28, -44, 44, -64, 64];
+
+/**
+ * Moves entries a little up or down within the room between their neighbours, so that their leaders cross no text. Order and
+ * distances stay. `columnTop` is where the column begins on the canvas.
+ */
+export function settleTops(entries: readonly Standing[], targets: Targets, columnTop: number, room: number, gap = 6): ReadonlyMap<string, number> {
+  const tops = new Map<string, number>();
+  let free = 0;
+  for (const [index, { key, top, height }] of entries.entries()) {
+    const next = entries[index + 1];
+    const highest = Math.max(free, (next ? next.top - gap : Math.max(room, top + height)) - height);
+    const ends = visibleEnds(targets, key);
+    let best = { top: Math.max(free, top), texts: Infinity };
+    for (const shift of ends.length === 0 ? [0] : shifts) {
+      const tried = Math.min(highest, Math.max(free, top + shift));
+      const routed = routeLeader({ x: targets.width, y: columnTop + tried + ruleOffset + 0.5 }, ends, targets.texts, []);
+      const texts = routed?.texts ?? 0;
+      if (texts < best.texts) best = { top: tried, texts };
+      if (best.texts === 0) break;
+    }
+    tops.set(key, best.top);
+    free = best.top + height + gap;
+  }
+  return tops;
 }

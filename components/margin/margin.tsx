@@ -6,7 +6,7 @@ import type { Anchor } from '@/lib/schemas/thread';
 import { layOutColumn } from './column-layout';
 import { FindingEntryView } from './finding-entry-view';
 import { LeaderLines } from './leader-lines';
-import { routeLeaders } from './leaders';
+import { routeLeaders, settleTops } from './leaders';
 import { LocatorChip } from './locator-chip';
 import { entryCounts, type MarginEntry } from './margin-entry';
 import { MarginFilters, type MarginFilter } from './margin-filters';
@@ -71,6 +71,13 @@ export function Margin({ entries, geometry, plan, shownVolts, checked, selected,
     });
   }, [crowded, heights]);
 
+  // Heights measured before the fonts were there are wrong: measure again.
+  useEffect(() => {
+    let over = false;
+    void document.fonts.ready.then(() => { if (!over) setFullHeights(new Map()); });
+    return () => { over = true; };
+  }, [shown.length]);
+
   const layout = layOutColumn(
     anchored.map((entry) => {
       const end = targets.of.get(entry.key)?.ends[0];
@@ -80,13 +87,14 @@ export function Margin({ entries, geometry, plan, shownVolts, checked, selected,
   );
   const ordered = [...anchored].sort((a, b) => (layout.tops.get(a.key) ?? 0) - (layout.tops.get(b.key) ?? 0));
   const tied = wide && geometry !== null && targets.height > 0;
+  const tops = tied ? settleTops(ordered.map(({ key }) => ({ key, top: layout.tops.get(key) ?? 0, height: heights.get(key) ?? 28 })), targets, headHeight, room) : layout.tops;
   const leaders = tied ? routeLeaders(ordered.map((entry) => {
     const listed = shown.find((one) => one.key === entry.key);
     return {
       key: entry.key,
       kind: listed?.kind ?? 'note',
       on: entry.key === selected || entry.key === formKey || (entry.anchor !== null && lit(entry.anchor)),
-      top: headHeight + (layout.tops.get(entry.key) ?? 0) - scroll,
+      top: headHeight + (tops.get(entry.key) ?? 0) - scroll,
     };
   }), targets, headHeight) : [];
 
@@ -112,7 +120,7 @@ export function Margin({ entries, geometry, plan, shownVolts, checked, selected,
           {shown.length === 0 && !form ? <div className="pr-0 pl-3 max-tablet:p-4">{empty}</div> : null}
           <div className="relative" style={tied ? { height: layout.total > room ? layout.total + 8 : room } : undefined}>
             {ordered.map((placed) => {
-              const style = tied ? { top: layout.tops.get(placed.key) ?? 0, visibility: heights.has(placed.key) ? 'visible' as const : 'hidden' as const } : undefined;
+              const style = tied ? { top: tops.get(placed.key) ?? 0, visibility: heights.has(placed.key) ? 'visible' as const : 'hidden' as const } : undefined;
               if (placed.key === formKey) {
                 return <div key={formKey} ref={refOf(formKey)} style={style} className={classNames('pl-3', tied && 'absolute inset-x-0')}>{form?.content}</div>;
               }
