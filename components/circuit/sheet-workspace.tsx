@@ -51,7 +51,7 @@ export function SheetWorkspace({ editor, state, session, snapshot, pane, title, 
   const toCanvas = useCallback(() => area.current?.querySelector<HTMLElement>('[role=application]')?.focus(), []);
   const refs = selected && selected.kind !== 'note' ? selected.finding.refs : [];
   const wanted = refs.join(' ');
-  const parts = state?.shown.parts;
+  const parts = state?.sheet.parts;
   const lit = useMemo(() => new Set((parts ?? []).filter((part) => part.ref !== '' && wanted.split(' ').includes(part.ref)).map((part) => part.id)), [parts, wanted]);
   const drawing = editor !== null && state !== null;
   return (

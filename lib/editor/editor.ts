@@ -120,9 +120,15 @@ export class Editor {
   }
 
   pointerMove(press: PointerPress): void {
-    const hover = this.hit(press);
-    if (hover.on !== 'nothing' || this.current.hover !== null) this.update({ hover: hover.on === 'nothing' ? null : hover });
+    if (this.current.gesture.doing === 'nothing' || this.current.gesture.doing === 'asking') this.lookUnder(press);
     this.tool.move(press);
+  }
+
+  /** Notes what the pointer is over. Not during a drag: there it would only cost time. */
+  private lookUnder(press: PointerPress): void {
+    const hit = this.hit(press);
+    const hover = hit.on === 'nothing' ? null : hit;
+    if (hover === null ? this.current.hover !== null : JSON.stringify(hover) !== JSON.stringify(this.current.hover)) this.update({ hover });
   }
 
   pointerUp(press: PointerPress): void {

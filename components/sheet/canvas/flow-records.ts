@@ -2,13 +2,12 @@ import { Position, type Edge, type Node, type NodeHandle } from 'reactflow';
 import { partBoxOf, pinPlacesOf } from '@/lib/document/geometry/pin-place';
 import type { Box, Point } from '@/lib/document/geometry/point';
 import { indexOf } from '@/lib/document/geometry/sheet-index';
-import { wirePath } from '@/lib/document/geometry/wire-path';
 import type { JunctionRecord, PartRecord, Sheet, WireEnd, WireRecord } from '@/lib/document/records';
 
 export type PartNode = Node<{ readonly part: PartRecord }, 'part'>;
 export type JunctionNode = Node<{ readonly wires: number }, 'junction'>;
 export type SheetNode = PartNode | JunctionNode;
-export type WireEdge = Edge<{ readonly path: readonly Point[]; readonly net: string | undefined; readonly hot: boolean }, 'wire'>;
+export type WireEdge = Edge<{ readonly net: string | undefined; readonly hot: boolean }, 'wire'>;
 
 /** Whole pixels, so that what the browser measures is what was said. */
 export function nodeBoxOf(part: PartRecord): Box {
@@ -67,30 +66,30 @@ const nodeOfEnd = (end: WireEnd): readonly [string, string] => (end.at === 'pin'
 
 const edges = new WeakMap<WireRecord, WireEdge>();
 
-function wireEdge(wire: WireRecord, spoken: Spoken, path: readonly Point[], net: string | undefined, hot: boolean): WireEdge {
+function wireEdge(wire: WireRecord, spoken: Spoken, net: string | undefined, hot: boolean): WireEdge {
   const known = edges.get(wire);
   const ariaLabel = spoken.get(wire.id) ?? 'Wire';
-  if (known?.data && known.data.path === path && known.data.net === net && known.data.hot === hot && known.ariaLabel === ariaLabel) return known;
+  if (known?.data && known.data.net === net && known.data.hot === hot && known.ariaLabel === ariaLabel) return known;
   const [source, sourceHandle] = nodeOfEnd(wire.a);
   const [target, targetHandle] = nodeOfEnd(wire.b);
-  const edge: WireEdge = { id: wire.id, type: 'wire', ariaLabel, domAttributes: { 'aria-roledescription': 'wire' }, source, sourceHandle, target, targetHandle, data: { path, net, hot } };
+  const edge: WireEdge = { id: wire.id, type: 'wire', ariaLabel, domAttributes: { 'aria-roledescription': 'wire' }, source, sourceHandle, target, targetHandle, data: { net, hot } };
   edges.set(wire, edge);
   return edge;
 }
 
-/** The sheet as nodes and edges. Records that did not change give the objects of last time, so that only what moved is drawn anew. */
-export function flowOf(
-  sheet: Sheet, spoken: Spoken, netOf: ReadonlyMap<string, string>, isHot: (net: string) => boolean,
-): { readonly nodes: readonly SheetNode[]; readonly edges: readonly WireEdge[] } {
+/** Parts and junctions as nodes. Records that did not change give the objects of last time, so that only what moved is drawn anew. */
+export function nodesOf(sheet: Sheet, spoken: Spoken): readonly SheetNode[] {
   const index = indexOf(sheet);
-  return {
-    nodes: [
-      ...sheet.parts.map((part) => partNode(part, spoken)),
-      ...sheet.junctions.map((junction) => junctionNode(junction, index.wiresAt.get(`junction:${junction.id}`)?.length ?? 0)),
-    ],
-    edges: sheet.wires.map((wire) => {
-      const net = netOf.get(wire.id);
-      return wireEdge(wire, spoken, wirePath(index, wire), net, net !== undefined && isHot(net));
-    }),
-  };
+  return [
+    ...sheet.parts.map((part) => partNode(part, spoken)),
+    ...sheet.junctions.map((junction) => junctionNode(junction, index.wiresAt.get(`junction:${junction.id}`)?.length ?? 0)),
+  ];
+}
+
+/** Wires as edges. Where they run they ask the editor themselves: a drag in progress changes no edge. */
+export function edgesOf(sheet: Sheet, spoken: Spoken, netOf: ReadonlyMap<string, string>, isHot: (net: string) => boolean): readonly WireEdge[] {
+  return sheet.wires.map((wire) => {
+    const net = netOf.get(wire.id);
+    return wireEdge(wire, spoken, net, net !== undefined && isHot(net));
+  });
 }

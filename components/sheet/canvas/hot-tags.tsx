@@ -3,6 +3,9 @@ import { memo } from 'react';
 import { HatchMark } from '@/components/ladder/hatch-mark';
 import { voltsWords } from '@/components/ladder/plan-words';
 import type { Point } from '@/lib/document/geometry/point';
+import { indexOf } from '@/lib/document/geometry/sheet-index';
+import { wirePath } from '@/lib/document/geometry/wire-path';
+import type { Sheet } from '@/lib/document/records';
 import type { WireEdge } from './flow-records';
 
 interface Run {
@@ -12,12 +15,15 @@ interface Run {
 }
 
 /** The longest run of each hazardous net, where its tag stands. */
-export function longestRuns(edges: readonly WireEdge[]): ReadonlyMap<string, Run> {
+export function longestRuns(sheet: Sheet, edges: readonly WireEdge[]): ReadonlyMap<string, Run> {
   const best = new Map<string, Run>();
-  for (const { data } of edges) {
-    if (!data?.hot || data.net === undefined) continue;
-    for (let at = 1; at < data.path.length; at += 1) {
-      const [a, b] = [data.path[at - 1] as Point, data.path[at] as Point];
+  const index = indexOf(sheet);
+  for (const { id, data } of edges) {
+    const wire = index.wire.get(id);
+    if (!wire || !data?.hot || data.net === undefined) continue;
+    const path = wirePath(index, wire);
+    for (let at = 1; at < path.length; at += 1) {
+      const [a, b] = [path[at - 1] as Point, path[at] as Point];
       const length = Math.abs(a.x - b.x) + Math.abs(a.y - b.y);
       if (length > (best.get(data.net)?.length ?? 39)) best.set(data.net, { a, b, length });
     }
@@ -26,10 +32,10 @@ export function longestRuns(edges: readonly WireEdge[]): ReadonlyMap<string, Run
 }
 
 /** Hatch tags with the voltage of each net above the touch-safe limit. Hatch means hazardous voltage and nothing else. */
-export const HotTags = memo(function HotTags({ edges, volts }: { readonly edges: readonly WireEdge[]; readonly volts: Readonly<Record<string, number>> }) {
+export const HotTags = memo(function HotTags({ sheet, edges, volts }: { readonly sheet: Sheet; readonly edges: readonly WireEdge[]; readonly volts: Readonly<Record<string, number>> }) {
   return (
     <svg aria-hidden="true" className="pointer-events-none absolute top-0 left-0 z-[2] size-px overflow-visible">
-      {[...longestRuns(edges)].map(([net, { a, b }]) => {
+      {[...longestRuns(sheet, edges)].map(([net, { a, b }]) => {
         const level = a.y === b.y;
         const [x, y] = [(a.x + b.x) / 2, (a.y + b.y) / 2];
         const value = volts[net] ?? 0;

@@ -15,8 +15,8 @@ import { spokenItems } from '@/lib/editor/spoken/part-spoken';
 import type { PresenceEntry } from '@/realtime/presence-fields';
 import { AskingBox } from './asking-box';
 import { CanvasGrid } from './canvas-grid';
-import { CanvasProvider } from './canvas-context';
-import { flowOf } from './flow-records';
+import { CanvasProvider, useEditorValue } from './canvas-context';
+import { edgesOf, nodesOf } from './flow-records';
 import { GestureOverlay } from './gesture-overlay';
 import { HotTags } from './hot-tags';
 import { JunctionNodeView } from './junction-node';
@@ -65,10 +65,9 @@ function Canvas({ editor, state, label, volts = {}, lit = noParts, others = [], 
   const labels = useMemo(() => new Map(placeLabels(sheet).map((one) => [one.part, one])), [sheet]);
   const frame = useMemo(() => frameBoxOf(sheet.parts.length + sheet.wires.length === 0 ? null : drawingBounds(sheet, 0)), [sheet]);
   const nets = useMemo(() => netOfLines(sheet), [sheet]);
-  const { nodes, edges } = useMemo(
-    () => flowOf(state.shown, spokenItems(sheet), nets, (net) => isHot(volts[net])),
-    [state.shown, sheet, nets, volts],
-  );
+  const shownSheet = useEditorValue(editor, (now) => now.shown);
+  const nodes = useMemo(() => nodesOf(shownSheet, spokenItems(sheet)), [shownSheet, sheet]);
+  const edges = useMemo(() => edgesOf(sheet, spokenItems(sheet), nets, (net) => isHot(volts[net])), [sheet, nets, volts]);
   const cursorTold = useCallback((at: { readonly x: number; readonly y: number } | null) => onCursor?.(at), [onCursor]);
   const pointer = useCanvasPointer(editor, cursorTold);
   const keys = useCanvasKeys(editor);
@@ -82,7 +81,7 @@ function Canvas({ editor, state, label, volts = {}, lit = noParts, others = [], 
     return () => onGeometry?.(null);
     // eslint-disable-next-line react-hooks/exhaustive-deps -- one geometry for the canvas's life; sheet and frame are told to it below.
   }, [editor, flow, onGeometry]);
-  useEffect(() => { geometry?.drawn(state.shown, frame); }, [geometry, state.shown, frame]);
+  useEffect(() => { geometry?.drawn(shownSheet, frame); }, [geometry, shownSheet, frame]);
   const tellView = useCallback((_: unknown, { x, y, zoom }: Viewport) => {
     geometry?.moved({ scale: zoom, x: (-x - insetLeft) / zoom, y: (-y - insetTop) / zoom }, { width: view.width + insetLeft + 10, height: view.height + insetTop + 46 });
   }, [geometry, view.width, view.height]);
@@ -131,7 +130,7 @@ function Canvas({ editor, state, label, volts = {}, lit = noParts, others = [], 
           >
             <CanvasGrid frame={frame} />
             <ViewportPortal>
-              <HotTags edges={edges} volts={volts} />
+              <HotTags sheet={sheet} edges={edges} volts={volts} />
               <PresenceOverlay others={others} sheet={sheet} />
               <GestureOverlay editor={editor} zigzag={zigzag} />
             </ViewportPortal>

@@ -59,6 +59,7 @@ export function useCanvasPointer(editor: Editor, onCursor: (at: { readonly x: nu
           return;
         }
         if (held.current === null && editor.state.ghost !== null) {
+          event.currentTarget.focus();
           editor.pointerDown(pressOf(event));
           editor.pointerUp(pressOf(event));
           return;

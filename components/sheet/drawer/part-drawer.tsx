@@ -1,5 +1,5 @@
 'use client';
-import { useEffect, useRef, useState, type KeyboardEvent } from 'react';
+import { memo, useEffect, useRef, useState, type KeyboardEvent } from 'react';
 import { artOf } from '@/components/drawing/part-view';
 import { SymbolView } from '@/components/drawing/symbol-view';
 import type { Editor } from '@/lib/editor/editor';
@@ -30,7 +30,7 @@ interface PartDrawerProps {
 }
 
 /** Parts by family, in the order of the job. A click or Enter takes one in hand, a drag carries it to its place. */
-export function PartDrawer({ editor, zigzag, onZigzag, onTaken }: PartDrawerProps) {
+export const PartDrawer = memo(function PartDrawer({ editor, zigzag, onZigzag, onTaken }: PartDrawerProps) {
   const [typed, setTyped] = useState('');
   const [open, setOpen] = useState<string>('Switch');
   const search = useRef<HTMLInputElement>(null);
@@ -40,6 +40,7 @@ export function PartDrawer({ editor, zigzag, onZigzag, onTaken }: PartDrawerProp
   const groups = searchKinds(typed);
   const take = (kind: Kind) => {
     editor.run('hold-part', { kind: kind.id });
+    setTyped('');
     onTaken();
   };
   const keys = () => [...(list.current?.querySelectorAll<HTMLElement>('button') ?? [])];
@@ -88,4 +89,4 @@ export function PartDrawer({ editor, zigzag, onZigzag, onTaken }: PartDrawerProp
       <ResistorForm zigzag={zigzag} onZigzag={onZigzag} />
     </aside>
   );
-}
+});
