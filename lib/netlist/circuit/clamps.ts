@@ -48,11 +48,24 @@ function clampOf(path: readonly Edge[], start: string, side: 'low' | 'high'): Cl
   return forward ? { parts, kind: 'diode', volts: flybackVolts } : null;
 }
 
+/**
+ * A capacitor between two nets that coils join to the switch: a tank, in which the coil's current swings on (a choke that
+ * feeds the middle of a self-oscillating pair, a work coil with its capacitor).
+ */
+export function tankOf(circuit: Circuit, { coil, near }: SwitchedCoil): NetlistPart | null {
+  const nets = new Set([...near].flatMap((start) => [...walk(circuit.graph, start, {
+    through: (edge) => edge.part.id !== coil.id && (edge.nature === 'coil' || edge.nature === 'joint'),
+    stopAt: (net) => circuit.rails.has(net),
+  }).keys()].filter((net) => !circuit.rails.has(net))));
+  return circuit.graph.edges.find((edge) => edge.nature === 'capacitor' && nets.has(edge.a) && nets.has(edge.b))?.part ?? null;
+}
+
 /** Clamps of a coil: across it, to a rail, or across its switch. */
 export function clampsOf(circuit: Circuit, switched: SwitchedCoil): readonly Clamp[] {
   const { near, far, stage, side } = switched;
   const gates = new Set(circuit.stages.map((other) => other.terminals.control));
-  const found: Clamp[] = [];
+  const tank = tankOf(circuit, switched);
+  const found: Clamp[] = tank ? [{ parts: [tank], kind: 'capacitor', volts: 0 }] : [];
   for (const start of near) {
     const steps = walk(circuit.graph, start, {
       through: (edge, from) => mayPass(switched, edge, from),

@@ -33,8 +33,9 @@ function switches(circuit: Circuit, stage: Stage): boolean {
 }
 
 function beyond(circuit: Circuit, coil: Edge, start: string): ReadonlyMap<string, Step> {
+  const atRail = circuit.rails.has(start);
   return walk(circuit.graph, start, {
-    through: (edge) => edge.part.id !== coil.part.id && carries.has(edge.nature),
+    through: (edge) => !atRail && edge.part.id !== coil.part.id && carries.has(edge.nature),
     stopAt: (net) => circuit.rails.has(net),
   });
 }

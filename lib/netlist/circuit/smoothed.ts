@@ -8,7 +8,7 @@ import { walk } from './walk';
 export function findSmoothedNets(graph: Graph, parts: readonly NetlistPart[], rails: ReadonlySet<string>): ReadonlySet<string> {
   const nets = new Set<string>();
   for (const part of parts.filter(isCapacitor)) {
-    for (const net of (endNets(part) ?? []).filter((end) => end !== '0')) {
+    for (const net of (endNets(part) ?? []).filter((end) => !rails.has(end))) {
       const steps = walk(graph, net, {
         through: ({ nature }) => nature === 'joint' || nature === 'resistor' || nature === 'coil',
         stopAt: (at) => rails.has(at),

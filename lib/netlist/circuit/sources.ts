@@ -33,6 +33,7 @@ export interface Sources {
 
 /** Nets reached from a gate or base through series parts; rails are reached and not walked beyond. */
 function controlReach(graph: Graph, rails: ReadonlySet<string>, net: string): ReadonlySet<string> {
+  if (rails.has(net)) return new Set([net]);
   const steps = walk(graph, net, {
     through: ({ nature }) => nature === 'resistor' || nature === 'joint' || nature === 'open' || nature === 'coil',
     stopAt: (reached) => rails.has(reached),

@@ -83,8 +83,9 @@ function neighbourhoodOf(graph: Graph, fixed: ReadonlySet<string>, { control, re
 function stageOf(graph: Graph, rails: ReadonlySet<string>, fixed: ReadonlySet<string>, gates: ReadonlySet<string>, sources: Sources, transistor: NetlistPart): Stage {
   const terminals = terminalsOf(transistor);
   const references = referencesOf(graph, rails, gates, terminals.reference);
+  const tied = fixed.has(terminals.control) || references.has(terminals.control);
   const reach = walk(graph, terminals.control, {
-    through: ({ nature }) => nature === 'resistor' || nature === 'joint' || nature === 'open' || nature === 'coil',
+    through: ({ nature }) => !tied && (nature === 'resistor' || nature === 'joint' || nature === 'open' || nature === 'coil'),
     stopAt: (net) => rails.has(net) || references.has(net),
   });
   const ways = sources.controls

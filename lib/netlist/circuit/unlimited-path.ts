@@ -16,6 +16,7 @@ function limitsNothing(edge: Edge, from: string, towardAnode: boolean): boolean 
 }
 
 function railsFrom(circuit: Circuit, led: NetlistPart, net: string, towardAnode: boolean): readonly string[] {
+  if (circuit.rails.has(net)) return [net];
   const steps = walk(circuit.graph, net, {
     through: (edge, from) => edge.part.id !== led.id && limitsNothing(edge, from, towardAnode),
     stopAt: (reached) => circuit.rails.has(reached),

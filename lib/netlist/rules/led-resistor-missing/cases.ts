@@ -9,6 +9,7 @@ export const cases: readonly RuleCase[] = [
   { name: 'LED in the drain of a switch', deck: deck(supply, led('D1', 'vbus', 'drain'), nFet(), resistor('R3', 'drv', 'gate', '10'), resistor('R2', 'drv', '0', '22k'), control()), expect: { outcome: 'fail', severity: 'stop', refs: ['D1', 'Q1'] } },
   { name: 'a pin’s own 25 Ω is no series resistor', deck: deck('V2 inside 0 5\n*@V2 role=pin', 'R9 inside pin 25\n*@R9 internal=pin-resistance', led('D1', 'pin', '0')), expect: { outcome: 'fail', severity: 'stop' } },
   { name: 'a rectifier in the way limits nothing', deck: deck(supply, 'D2 vbus a DX\n*@D2 vr_max=100', led('D1', 'a', '0')), expect: { outcome: 'fail', severity: 'stop' } },
+  { name: 'a cell below the LED’s own voltage drives little through it', deck: deck('V1 bat 0 3\n*@V1 role=battery rs=20', led('D1', 'bat', '0', 'vf=3.2 if_max=20m')), expect: { outcome: 'fail', severity: 'caution' } },
   { name: 'resistor above', deck: deck(supply, resistor('R1', 'vbus', 'a', '1k'), led('D1', 'a', '0')), expect: { outcome: 'pass' } },
   { name: 'resistor below', deck: deck(supply, led('D1', 'vbus', 'k'), resistor('R1', 'k', '0', '1k')), expect: { outcome: 'pass' } },
   { name: 'one resistor for two LEDs side by side', deck: deck(supply, resistor('R1', 'vbus', 'a', '1k'), led('D1', 'a', '0'), led('D2', 'a', '0')), expect: { outcome: 'pass' } },

@@ -2,7 +2,7 @@ import type { Circuit } from '../../circuit/circuit';
 import type { LedBranch } from '../../circuit/led-branches';
 import { magnitudeOf } from '../../circuit/part-facts';
 import { unlimitedVolts } from '../../circuit/unlimited-path';
-import type { Remedy } from '../../findings/finding';
+import type { Remedy, Severity } from '../../findings/finding';
 import type { Outcome, Rule } from '../rule';
 import { branchRefs, branchTarget } from '../support/led-current';
 import { chooseLedResistor } from '../support/led-resistor-choice';
@@ -39,7 +39,7 @@ function remedyOf(circuit: Circuit, branch: LedBranch, volts: number, values: Va
 
 function outcomeOf(circuit: Circuit, branch: LedBranch, values: Values): Outcome {
   const names = listWords(branch.leds.map((led) => led.ref));
-  const base = { severity: 'stop', target: branchTarget(branch), refs: branchRefs(branch) } as const;
+  const base = { severity: 'stop' as Severity, target: branchTarget(branch), refs: branchRefs(branch) };
   const volts = Math.max(...branch.leds.map((led) => unlimitedVolts(circuit, led) ?? 0));
   const count = (value: number) => ({
     entity: branch.leds[0]!.ref, quantity: 'series resistors', value, unit: '', source: 'connections', limit: 1, limitSource: 'an LED’s current rises tenfold in tenths of a volt: something must set it',
@@ -47,12 +47,13 @@ function outcomeOf(circuit: Circuit, branch: LedBranch, values: Values): Outcome
   if (volts === 0) {
     return everywhere({ ...base, outcome: 'pass', message: `${names}: the path holds a resistor`, evidence: [count(Math.max(1, branch.resistors.length))] });
   }
+  const forward = branch.leds.reduce((sum, led) => sum + (magnitudeOf(led, 'vf') ?? 0), 0);
   return everywhere({
-    ...base, outcome: 'fail',
+    ...base, outcome: 'fail', severity: volts <= forward ? 'caution' : 'stop',
     refs: [...branch.leds, ...branch.transistors].map((part) => part.ref),
     message: `${names} has no resistor in its path: ${say(volts, 'V')} stand across it and nothing sets the current`,
     evidence: [count(0), { entity: branch.leds[0]!.ref, quantity: 'voltage', value: volts, unit: 'V', source: 'source values' }],
-    remedy: remedyOf(circuit, branch, volts, values),
+    remedy: volts <= forward ? { words: `Put some tens of ohms in series with ${branch.leds[0]!.ref}: a fresh cell gives more than its name.` } : remedyOf(circuit, branch, volts, values),
   });
 }
 

@@ -70,7 +70,7 @@ function decide({ parameters: { aboveThreshold, specShare } }: Input, stage: Sta
   const gate = (limit: number, limitSource: string): Evidence => ({ entity, quantity: 'gate drive', value: volts, unit: 'V', source, limit, limitSource });
   const low = bound ? gate(bound.volts + aboveThreshold, `${say(aboveThreshold, 'V')} above ${bound.fact} of ${transistor.ref}, ${originOf(transistor, bound.fact)}`) : null;
   if (bound && low && volts < bound.volts + aboveThreshold) return { severity: 'stop', evidence: [low] };
-  const amps = isSwitchedCoil(stage) ? undefined : Math.abs(ampsInto(point, transistor, 'D') ?? NaN);
+  const amps = isSwitchedCoil(stage) || (stage.inductive && stage.control === null) ? undefined : Math.abs(ampsInto(point, transistor, 'D') ?? NaN);
   const most = saturationAmps(stage, volts);
   if (amps !== undefined && most !== undefined && amps > most) {
     return { severity: 'stop', evidence: [{ entity: transistor.ref, quantity: 'current', value: amps, unit: 'A', source, limit: most, limitSource: `saturation current at ${say(volts, 'V')} and V_GS(th) maximum` }] };

@@ -1,5 +1,5 @@
 import type { Circuit } from '../../circuit/circuit';
-import { clampsOf } from '../../circuit/clamps';
+import { clampsOf, tankOf } from '../../circuit/clamps';
 import { switchedCoils } from '../../circuit/coils';
 import { isFet, isTransistor } from '../../circuit/part-nature';
 import { terminalsOf } from '../../circuit/terminals';
@@ -32,13 +32,24 @@ function clampVolts(circuit: Circuit, part: NetlistPart): { readonly volts: numb
   return { volts: Math.max(0, ...volts), inductive: coils.length > 0 };
 }
 
+/** Rails that feed a tank which the transistor keeps swinging: its peak is π times their volts (`docs/rules.md` 28). */
+function tankRails(circuit: Circuit, part: NetlistPart): readonly string[] {
+  const stage = circuit.stages.find((one) => one.transistor.id === part.id);
+  return (stage ? switchedCoils(circuit, stage) : []).filter((coil) => tankOf(circuit, coil) !== null)
+    .flatMap(({ far }) => [...far].filter((net) => circuit.rails.has(net)));
+}
+
 function transistorBlocking(circuit: Circuit, part: NetlistPart): Blocking {
   const { output, reference } = terminalsOf(part);
+  const rails = tankRails(circuit, part);
   const { volts, inductive } = clampVolts(circuit, part);
   return {
     part, fact: isFet(part) ? 'vds_max' : 'vceo_max', words: isFet(part) ? 'V_DS maximum' : 'V_CEO maximum',
     across: isFet(part) ? 'V_DS' : 'V_CE', clampVolts: volts, inductive,
-    measure: (point) => Math.abs(voltsOf(point, output) - voltsOf(point, reference)) + volts,
+    measure: (point) => Math.max(
+      Math.abs(voltsOf(point, output) - voltsOf(point, reference)) + volts,
+      ...rails.map((net) => Math.PI * Math.abs(voltsOf(point, net) - voltsOf(point, reference))),
+    ),
   };
 }
 

@@ -1,5 +1,5 @@
 import { isYes } from '../../circuit/part-facts';
-import { factRegistry } from '../../facts/fact-registry';
+import { factRegistry, type FactKey } from '../../facts/fact-registry';
 import { kindOf } from '../../kinds/kind-registry';
 import type { FieldDefinition } from '../../kinds/kind';
 import type { Netlist, NetlistPart } from '../../netlist';
@@ -15,8 +15,14 @@ function isModelled(netlist: Netlist, part: NetlistPart): boolean {
   return part.model !== undefined && netlist.models.some((card) => card.name.toLowerCase() === part.model?.toLowerCase());
 }
 
-const missingFields = (part: NetlistPart): readonly FieldDefinition[] =>
-  kindOf(part.kind).fields.filter(({ fact, required }) => required && (part.facts[fact] === undefined || part.facts[fact] === ''));
+/** A generator with one level, or with a plain value, swings between that and 0 (`docs/rules.md`, "States"). */
+function isImplied({ kind, facts }: NetlistPart, fact: FactKey): boolean {
+  if (kind !== 'signal-generator') return false;
+  return (fact === 'high' || fact === 'low') && (facts.value !== undefined || (fact === 'low' && facts.high !== undefined));
+}
+
+const missingFields = (part: NetlistPart): readonly FieldDefinition[] => kindOf(part.kind).fields
+  .filter(({ fact, required }) => required && (part.facts[fact] === undefined || part.facts[fact] === '') && !isImplied(part, fact));
 
 const wordsOf = ({ fact, label }: FieldDefinition): string => (label ?? factRegistry[fact].label).toLowerCase();
 
