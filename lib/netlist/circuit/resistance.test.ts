@@ -1,37 +1,26 @@
-import { describe, expect, it } from 'vitest';
+import { expect, test } from 'vitest';
 import type { NetlistPart } from '../netlist';
-import type { Edge } from './graph';
+import { buildGraph } from './graph';
 import { resistanceBetween } from './resistance';
 
-function resistor(a: string, b: string, ohms: number): Edge {
-  const id = `${a} ${b}`;
-  const part: NetlistPart = { id, ref: id, kind: 'resistor', pins: { 1: a, 2: b }, facts: { value: ohms }, origins: {}, leftOpen: [] };
-  return { part, a, b, aPin: '1', bPin: '2', nature: 'resistor' };
-}
+const part = (ref: string, kind: NetlistPart['kind'], a: string, b: string, value?: number): NetlistPart => ({
+  id: ref, ref, kind, pins: kind === 'dc-source' ? { '+': a, '-': b } : { 1: a, 2: b }, facts: value === undefined ? {} : { value }, origins: {}, leftOpen: [],
+});
+const ohms = (parts: readonly NetlistPart[], from: string, to: string, gone: readonly string[] = []): number =>
+  resistanceBetween(buildGraph(parts).edges, from, to, new Set(gone));
 
-describe('resistanceBetween', () => {
-  it('adds in series and in parallel', () => {
-    expect(resistanceBetween([resistor('a', 'm', 10), resistor('m', 'b', 20)], 'a', 'b')).toBeCloseTo(30, 9);
-    expect(resistanceBetween([resistor('a', 'b', 30), resistor('a', 'm', 20), resistor('m', 'b', 40)], 'a', 'b')).toBeCloseTo(20, 9);
-  });
+test('series, parallel and a balanced bridge', () => {
+  expect(ohms([part('R1', 'resistor', 'a', 'b', 1e3), part('R2', 'resistor', 'b', '0', 2e3)], 'a', '0')).toBeCloseTo(3e3, 6);
+  expect(ohms([part('R1', 'resistor', 'a', '0', 1e3), part('R2', 'resistor', 'a', '0', 1e3)], 'a', '0')).toBeCloseTo(500, 6);
+  const bridge = [['R1', 'a', 'x', 1e3], ['R2', 'a', 'y', 1e3], ['R3', 'x', '0', 1e3], ['R4', 'y', '0', 1e3], ['R5', 'x', 'y', 47]] as const;
+  expect(ohms(bridge.map(([ref, a, b, value]) => part(ref, 'resistor', a, b, value)), 'a', '0')).toBeCloseTo(1e3, 6);
+});
 
-  it('solves a bridge that is neither (five resistors, 1 Ω balanced; 7/5 Ω with arms 1, 2, 2, 1 and bridge 1)', () => {
-    const bridge = (r1: number, r2: number, r3: number, r4: number) =>
-      [resistor('a', 'l', r1), resistor('l', 'b', r2), resistor('a', 'r', r3), resistor('r', 'b', r4), resistor('l', 'r', 1)];
-    expect(resistanceBetween(bridge(1, 1, 1, 1), 'a', 'b')).toBeCloseTo(1, 9);
-    expect(resistanceBetween(bridge(1, 2, 2, 1), 'a', 'b')).toBeCloseTo(7 / 5, 9);
-  });
-
-  it('is the same from either end, whatever hangs behind them', () => {
-    const behind = [resistor('b', 'x', 5), resistor('x', 'y', 5), resistor('y', 'b', 5), resistor('a', 'z', 3)];
-    const between = [resistor('a', 'm', 10), resistor('m', 'b', 20)];
-    expect(resistanceBetween([...between, ...behind], 'a', 'b')).toBeCloseTo(30, 9);
-    expect(resistanceBetween([...between, ...behind], 'b', 'a')).toBeCloseTo(30, 9);
-  });
-
-  it('is 0 for one net, Infinity without a path or with the path taken out', () => {
-    expect(resistanceBetween([], 'a', 'a')).toBe(0);
-    expect(resistanceBetween([resistor('a', 'x', 1)], 'a', 'b')).toBe(Infinity);
-    expect(resistanceBetween([resistor('a', 'b', 1)], 'a', 'b', new Set(['a b']))).toBe(Infinity);
-  });
+test('sources are shorted, leads are wires, capacitors are open', () => {
+  const parts = [part('R1', 'resistor', 'gate', 'bus', 22e3), part('V1', 'dc-source', 'bus', '0', 12), part('W1', 'removable-lead', 'gate', 'far'), part('C1', 'capacitor', 'x', '0', 1e-9)];
+  expect(ohms(parts, 'gate', '0')).toBeCloseTo(22e3, 6);
+  expect(ohms(parts, 'far', '0')).toBeCloseTo(22e3, 6);
+  expect(ohms(parts, 'far', '0', ['W1'])).toBe(Infinity);
+  expect(ohms(parts, 'x', '0')).toBe(Infinity);
+  expect(ohms(parts, 'bus', '0')).toBe(0);
 });
