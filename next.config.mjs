@@ -8,7 +8,7 @@ const config = {
   poweredByHeader: false,
   reactStrictMode: true,
   // Native modules and workers that must stay files of their own.
-  serverExternalPackages: ['@node-rs/argon2', 'eecircuit-engine', 'elkjs', 'mysql2', 'pino'],
+  serverExternalPackages: ['@node-rs/argon2', 'eecircuit-engine', 'elkjs', 'lib0', 'mysql2', 'pino', 'y-protocols', 'y-websocket', 'yjs'],
   headers: async () => [
     { source: '/:path*', headers: securityHeaders },
     { source: '/vendor/:path*', headers: engineHeaders },
