@@ -4,6 +4,7 @@ import type { Box } from '@/lib/document/geometry/point';
 import { placeLabels } from './label-places';
 import { LineView } from './line-view';
 import { PartView } from './part-view';
+import { throughMarks } from './through-marks';
 
 interface SheetDrawingProps {
   readonly sheet: Sheet;
@@ -22,7 +23,7 @@ export function SheetDrawing({ sheet, volts = {}, lit, within }: SheetDrawingPro
       {sheet.parts.map((part) => (
         <g key={part.id} data-part={part.ref}>
           {lit?.has(part.id) ? <circle cx={part.x} cy={part.y} r="34" className="fill-act-wash" /> : null}
-          <PartView part={part} />
+          <PartView part={part} through={throughMarks(sheet).has(part.id)} />
         </g>
       ))}
       {placeLabels(sheet).filter(({ box }) => !within || (box.left >= within.left && box.right <= within.right && box.top >= within.top && box.bottom <= within.bottom)).map((label) => (

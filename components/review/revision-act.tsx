@@ -8,7 +8,7 @@ import { revisionWords } from './revision-words';
 
 /** What the reader can do with a revision now: ask, review and sign, or read how far it is signed. */
 export function RevisionAct({ revision, full = false }: { readonly revision: Revision; readonly full?: boolean }) {
-  const { circuitId } = useCircuitPlace();
+  const { circuitId, person } = useCircuitPlace();
   const may = useMay();
   const now = new Date();
   const to = signedTo(revision, now);
@@ -21,7 +21,7 @@ export function RevisionAct({ revision, full = false }: { readonly revision: Rev
     <>
       {full ? null : <p><b className="block font-medium text-silk">{point ? `Signed off to ${pointWords(point)}` : revisionWords(revision, now)}</b>{to ? 'A peer’s opinion of this drawing' : `${revision.counts.stop} stops, ${revision.counts.caution} cautions at the cut`}</p>}
       {revision.state === 'cut' && may('ask for review') ? <ButtonLink href={`${path}/ask`} tone="primary" size={size} className={wide}>Ask for review of {revision.letter}</ButtonLink>
-        : reviewing && (may('sign off') || may('ask for changes')) ? <ButtonLink href={`${path}/sign`} tone="sign" size={size} className={wide}>Review and sign…</ButtonLink>
+        : reviewing && (may('sign off') || may('ask for changes') || revision.reviewers.some((one) => one.id === person?.id)) ? <ButtonLink href={`${path}/sign`} tone="sign" size={size} className={wide}>Review and sign…</ButtonLink>
           : reviewing && may('read the bench') ? <ButtonLink href={`${path}/sign`} size={size} className={wide}>How far it can be signed</ButtonLink> : null}
     </>
   );

@@ -61,7 +61,8 @@ export function SignOffPage({ letter }: { readonly letter: string }) {
   const holdPoint = chosen ?? suggested?.name ?? null;
   const index = points.findIndex((point) => point.name === holdPoint);
   const point = points[index];
-  const maySign = may('sign off') || may('ask for changes');
+  const mayObject = may('ask for changes') || revision.reviewers.some((one) => one.id === person.id);
+  const maySign = may('sign off') || mayObject;
   const refused = !open ? `${letter} is ${revisionWords(revision, now).toLowerCase()}` : !may('sign off') ? 'a mentor who made no part of it signs' : holdPoint !== null && signed.has(holdPoint) ? 'this hold point is signed off' : index >= free ? reasonsAgainst(rows, holdPoint ?? '')[0]?.words.toLowerCase().replace(/^/, 'against it: ') ?? 'a hold point below is refused' : null;
   const undetermined = (findings.data ?? []).filter((finding) => finding.outcome === 'undetermined' && finding.severity === 'stop' && point !== undefined && (finding.fromVolts === null || finding.fromVolts <= point.volts));
 
@@ -92,7 +93,7 @@ export function SignOffPage({ letter }: { readonly letter: string }) {
           </>
         )}
         <div className="mt-3.5 grid grid-cols-2 items-start gap-6 pb-4 max-wide:grid-cols-1 max-wide:gap-3.5 max-tablet:mt-0">
-          {maySign ? <SignForm key={holdPoint} revision={revision} holdPoint={holdPoint} refused={refused} person={person} undetermined={undetermined} acts={acts} onSigned={() => { toast(`Signed off. ${letter} alone is covered.`); router.push(`/circuits/${circuitId}/revisions/${letter}`); }} onAskForChanges={may('ask for changes') && open ? () => setObjecting(true) : null} /> : null}
+          {maySign ? <SignForm key={holdPoint} revision={revision} holdPoint={holdPoint} refused={refused} person={person} undetermined={undetermined} acts={acts} onSigned={() => { toast(`Signed off. ${letter} alone is covered.`); router.push(`/circuits/${circuitId}/revisions/${letter}`); }} onAskForChanges={mayObject && open ? () => setObjecting(true) : null} /> : null}
           <div className="space-y-3.5">
             <RefusedPanel revision={revision} rows={rows} free={free} circuitId={circuitId} />
             <ObjectionsPanel objections={revision.objections} personId={person.id} mayOverride={may('override an objection')} acts={acts} />

@@ -26,7 +26,8 @@ export default async function CircuitLayout({ params, children }: CircuitLayoutP
     circuitId: access.circuit,
     bench: { slug: access.slug, name: await benchName(database(), access.bench) },
     person,
-    may: actions.filter((action) => may(action, access.standing)),
+    // Which revision somebody contributed to is told by the revision itself.
+    may: actions.filter((action) => may(action, { ...access.standing, contributor: false })),
   };
   return <CircuitPlaceProvider value={place}><QueryProvider>{children}</QueryProvider></CircuitPlaceProvider>;
 }

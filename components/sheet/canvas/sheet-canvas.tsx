@@ -72,18 +72,15 @@ function Canvas({ editor, state, label, volts = {}, lit = noParts, others = [], 
   const pointer = useCanvasPointer(editor, cursorTold);
   const keys = useCanvasKeys(editor);
   const view = useCanvasView(editor, frame, root);
-  const [geometry, setGeometry] = useState<ReadingGeometry | null>(null);
+  const [geometry] = useState(() => new ReadingGeometry(sheet, frame, { x: 0, y: 0, scale: 1 }, { width: 0, height: 0 }, (point) => { void flow.setCenter(point.x, point.y, { zoom: flow.getZoom() }); }));
 
   useEffect(() => {
-    const made = new ReadingGeometry(editor.state.sheet, frame, { x: 0, y: 0, scale: 1 }, { width: 0, height: 0 }, (point) => { void flow.setCenter(point.x, point.y, { zoom: flow.getZoom() }); });
-    setGeometry(made);
-    onGeometry?.(made);
+    onGeometry?.(geometry);
     return () => onGeometry?.(null);
-    // eslint-disable-next-line react-hooks/exhaustive-deps -- one geometry for the canvas's life; sheet and frame are told to it below.
-  }, [editor, flow, onGeometry]);
-  useEffect(() => { geometry?.drawn(shownSheet, frame); }, [geometry, shownSheet, frame]);
+  }, [geometry, onGeometry]);
+  useEffect(() => { geometry.drawn(shownSheet, frame); }, [geometry, shownSheet, frame]);
   const tellView = useCallback((_: unknown, { x, y, zoom }: Viewport) => {
-    geometry?.moved({ scale: zoom, x: (-x - insetLeft) / zoom, y: (-y - insetTop) / zoom }, { width: view.width + insetLeft + 10, height: view.height + insetTop + 46 });
+    geometry.moved({ scale: zoom, x: (-x - insetLeft) / zoom, y: (-y - insetTop) / zoom }, { width: view.width + insetLeft + 10, height: view.height + insetTop + 46 });
   }, [geometry, view.width, view.height]);
   useEffect(() => { tellView(null, flow.getViewport()); }, [tellView, flow]);
 

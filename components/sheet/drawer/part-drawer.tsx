@@ -14,9 +14,9 @@ function KindKey({ kind, zigzag, onTake, onDragStart }: { readonly kind: Kind; r
   const side = Math.max(right - left, bottom - top, 60) + 10;
   const [x, y] = [(left + right) / 2 - side / 2, (top + bottom) / 2 - side / 4];
   return (
-    <button type="button" data-kind={kind.id} onClick={onTake} onPointerDown={(event) => { if (event.button === 0 && event.pointerType === 'mouse') onDragStart(); }} className="flex h-9 w-full items-center gap-3 px-3 text-left text-md text-silk hover:bg-key-hi focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-act">
-      <svg width="60" height="30" viewBox={`${x} ${y} ${side} ${side / 2}`} aria-hidden="true" className="flex-none [--film:var(--panel)] [--ink:var(--silk)]"><SymbolView art={art} /></svg>
-      <span className="min-w-0 truncate">{kind.title}</span>
+    <button type="button" data-kind={kind.id} onClick={onTake} onPointerDown={(event) => { if (event.button === 0 && event.pointerType === 'mouse') onDragStart(); }} className="flex min-h-9 w-full items-center gap-2 px-2 text-left text-sm text-silk hover:bg-key-hi focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-act">
+      <svg width="56" height="28" viewBox={`${x} ${y} ${side} ${side / 2}`} aria-hidden="true" className="flex-none [--film:var(--panel)] [--ink:var(--silk)]"><SymbolView art={art} /></svg>
+      <span className="min-w-0 leading-tight">{kind.title}</span>
     </button>
   );
 }
