@@ -16,6 +16,7 @@ export default defineConfig({
   expect: { timeout: 10_000 },
   reporter: process.env['PLAYWRIGHT_JSON_OUTPUT_FILE'] ? [['list'], ['json']] : [['list']],
   use: {
+    actionTimeout: 15_000,
     baseURL: process.env['E2E_ADDRESS'] ?? 'http://127.0.0.1:3000',
     viewport: { width: 1440, height: 900 },
     contextOptions: { reducedMotion: 'reduce' },
