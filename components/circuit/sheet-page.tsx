@@ -9,6 +9,7 @@ import type { MarginAnchor, SheetGeometry } from '@/components/margin/sheet-geom
 import { stopFlags } from '@/components/margin/stop-flags';
 import { useSelectedEntry } from '@/components/margin/use-selected-entry';
 import { useThreadActions } from '@/components/margin/use-thread-actions';
+import { contentHashOf } from '@/lib/document/nets/sheet-to-netlist';
 import type { Finding } from '@/lib/netlist/findings/finding';
 import type { Anchor } from '@/lib/schemas/thread';
 import { CautionsLine } from './cautions-line';
@@ -44,8 +45,9 @@ export function SheetPage() {
   const { session, snapshot } = useSheetSession(circuitId, person?.id ?? null);
   const { editor, state } = useEditor(snapshot);
   const title = circuit.data?.title ?? '';
-  const live = useLiveFindings(state?.sheet ?? null, title);
-  const { points, plan } = useMemo(() => planOfSheet(state?.sheet ?? null, circuit.data?.holdPoints ?? []), [state?.sheet, circuit.data?.holdPoints]);
+  const sheet = state?.sheet ?? null;
+  const live = useLiveFindings(sheet, title);
+  const { points, plan } = useMemo(() => planOfSheet(sheet, circuit.data?.holdPoints ?? []), [sheet, circuit.data?.holdPoints]);
   const [shown, show] = useShownAt(plan);
   const [selected, select] = useSelectedEntry();
   const [geometry, setGeometry] = useState<SheetGeometry | null>(null);
@@ -61,11 +63,13 @@ export function SheetPage() {
   const lit = useCallback((anchor: MarginAnchor) => (anchor.kind === 'ref' ? refs.has(anchor.ref) : anchor.kind === 'part' ? state?.selection.has(anchor.id) ?? false : false), [refs, state]);
   const jump = useCallback((anchor: MarginAnchor) => { setPane('drawing'); geometry?.reveal(anchor); }, [geometry]);
 
+  const hash = useMemo(() => (sheet ? contentHashOf(sheet) : null), [sheet]);
+
   if (!circuit.data || !revisions.data || !person) {
     return <CircuitLoading error={circuit.error ?? revisions.error} onRetry={() => { void circuit.refetch(); void revisions.refetch(); }} />;
   }
   const newest = revisions.data[0];
-  const moved = newest === undefined || circuit.data.draft || (snapshot?.save.state ?? 'saved') !== 'saved';
+  const moved = newest === undefined || (hash === null ? circuit.data.draft : hash !== newest.contentHash);
   const point = points.find((one) => one.name === shown);
   const under = draftWords(newest, moved);
   const noteOn = (anchor: Anchor, words: string) => { setDraft({ anchor, words }); setPane('margin'); };

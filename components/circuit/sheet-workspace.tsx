@@ -1,5 +1,5 @@
 'use client';
-import { useCallback, useMemo, useRef, type ReactNode } from 'react';
+import { useMemo, type ReactNode } from 'react';
 import { voltsWords } from '@/components/ladder/plan-words';
 import type { MarginEntry } from '@/components/margin/margin-entry';
 import type { MarginAnchor, SheetGeometry } from '@/components/margin/sheet-geometry';
@@ -43,12 +43,15 @@ export interface SheetWorkspaceProps {
   readonly margin: (form: { readonly anchor: MarginAnchor; readonly content: ReactNode } | null) => ReactNode;
 }
 
+/** Gives the focus to the canvas, where the sheet's keys are live. */
+function toCanvas(): void {
+  document.querySelector<HTMLElement>('[role=application]')?.focus();
+}
+
 /** Drawer, canvas and margin side by side. */
 export function SheetWorkspace({ editor, state, session, snapshot, pane, title, newest, moved, shown, volts, selected, planning, onPlanning, listing, onListing, onGeometry, margin }: SheetWorkspaceProps) {
-  const area = useRef<HTMLDivElement>(null);
   const [zigzag, setZigzag] = useResistorForm();
   const pointAt = usePresence(session, state);
-  const toCanvas = useCallback(() => area.current?.querySelector<HTMLElement>('[role=application]')?.focus(), []);
   const refs = selected && selected.kind !== 'note' ? selected.finding.refs : [];
   const wanted = refs.join(' ');
   const parts = state?.sheet.parts;

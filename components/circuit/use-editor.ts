@@ -1,5 +1,5 @@
 'use client';
-import { useEffect, useMemo, useState, useSyncExternalStore } from 'react';
+import { useEffect, useMemo, useSyncExternalStore } from 'react';
 import { Editor } from '@/lib/editor/editor';
 import type { EditorState } from '@/lib/editor/editor-state';
 import type { SheetSnapshot } from '@/realtime/client/sheet-session';
@@ -22,15 +22,10 @@ function quietState(editor: Editor): () => EditorState {
 
 /** The editor of the document in hand. Another document, after a refused edit, gets an editor with a history of its own. */
 export function useEditor(snapshot: SheetSnapshot | null): { readonly editor: Editor | null; readonly state: EditorState | null } {
-  const [editor, setEditor] = useState<Editor | null>(null);
   const doc = snapshot?.loaded ? snapshot.doc : null;
   const editable = snapshot?.editable ?? false;
-  useEffect(() => {
-    if (!doc) return;
-    const made = new Editor({ doc, readOnly: true });
-    setEditor(made);
-    return () => { made.destroy(); setEditor(null); };
-  }, [doc]);
+  const editor = useMemo(() => (doc ? new Editor({ doc, readOnly: true }) : null), [doc]);
+  useEffect(() => editor?.connect(), [editor]);
   useEffect(() => { editor?.setReadOnly(!editable); }, [editor, editable]);
   const read = useMemo(() => (editor ? quietState(editor) : () => null), [editor]);
   const state = useSyncExternalStore(editor?.subscribe ?? never, read, () => null);

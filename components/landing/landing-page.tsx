@@ -1,3 +1,4 @@
+import { counted } from '@/components/ui/counted';
 import Link from 'next/link';
 import { ThemeToggle } from '@/components/shell/theme-toggle';
 import { BarRule, TopBar } from '@/components/shell/top-bar';
@@ -46,7 +47,7 @@ export function LandingPage({ sheet, check, demoHref, signedIn }: LandingPagePro
           </div>
           <figure>
             <ProductPicture sheet={sheet} check={check} />
-            <figcaption className="mt-2 text-sm text-silk-2">{sheet.title}: {check.checks} checks, {stops} stops. {demoHref ? <Link href={demoHref} prefetch={false} className="text-act underline underline-offset-[3px]">Open this circuit</Link> : null}</figcaption>
+            <figcaption className="mt-2 text-sm text-silk-2">{sheet.title}: {check.checks} checks, {counted(stops, 'stop')}. {demoHref ? <Link href={demoHref} prefetch={false} className="text-act underline underline-offset-[3px]">Open this circuit</Link> : null}</figcaption>
           </figure>
         </div>
         <ol id="how" className="mt-10 grid grid-cols-4 gap-[26px] max-wide:grid-cols-2 max-tablet:grid-cols-1">

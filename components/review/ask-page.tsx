@@ -1,4 +1,5 @@
 'use client';
+import { counted } from '@/components/ui/counted';
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import { CautionsLine } from '@/components/circuit/cautions-line';
@@ -53,7 +54,7 @@ export function AskPage({ letter }: { readonly letter: string }) {
       tab="revisions"
       letters={revisions.data.map((one) => one.letter)}
       back={{ href: `/circuits/${circuitId}/revisions/${letter}`, words: `Back to revision ${letter}` }}
-      ladder={<ReadingRow revisions={revisions.data} revision={revision} shown={shown} onShow={show} act={<p><b className="block font-medium text-silk">{revisionWords(revision, now)}</b>{revision.counts.stop} stops, {revision.counts.caution} cautions stored</p>} />}
+      ladder={<ReadingRow revisions={revisions.data} revision={revision} shown={shown} onShow={show} act={<p><b className="block font-medium text-silk">{revisionWords(revision, now)}</b>{counted(revision.counts.stop, 'stop')}, {counted(revision.counts.caution, 'caution')} stored</p>} />}
       cautions={volts > touchSafeVolts ? <CautionsLine volts={volts} /> : null}
       status={<StatusStrip lamp="caution" state={revisionWords(revision, now)} right={<span>Exactly {letter} is sent, hash <span className="figure">{shortHash(revision.contentHash)}</span></span>} />}
     >
@@ -71,10 +72,10 @@ export function AskPage({ letter }: { readonly letter: string }) {
                 <div className={row}><dt className="text-ink-2">Hash</dt><dd className="figure">{hashWords(revision.contentHash)}</dd></div>
                 {revision.note ? <div className={row}><dt className="text-ink-2">Note</dt><dd>{revision.note}</dd></div> : null}
                 <div className={row}><dt className="text-ink-2">Plan</dt><dd className="figure whitespace-normal">{revision.holdPoints.length === 0 ? 'none: nothing can be signed' : revision.holdPoints.map((point) => voltsWords(point.volts)).join(', ')}</dd></div>
-                <div className={row}><dt className="text-ink-2">Checks</dt><dd>run at the cut<span className="block text-sm text-ink-2">{revision.counts.stop} stops, {revision.counts.caution} cautions, {revision.counts.undetermined} undetermined</span></dd></div>
+                <div className={row}><dt className="text-ink-2">Checks</dt><dd>run at the cut<span className="block text-sm text-ink-2">{counted(revision.counts.stop, 'stop')}, {counted(revision.counts.caution, 'caution')}, {revision.counts.undetermined} undetermined</span></dd></div>
               </dl>
             </section>
-            <ToWhom letter={letter} members={members.data ?? []} contributors={revision.contributors} self={person.id} named={named} onNamed={setNamed} reviewers={reviewers} onReviewers={setReviewers} />
+            <ToWhom letter={letter} members={members.data ?? null} contributors={revision.contributors} self={person.id} named={named} onNamed={setNamed} reviewers={reviewers} onReviewers={setReviewers} />
             <OpenPoints findings={findings.data ?? []} threads={threads.data ?? []} plan={revision.holdPoints} circuitId={circuitId} letter={letter} />
           </div>
         </div>

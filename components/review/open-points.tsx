@@ -1,3 +1,4 @@
+import { counted } from '@/components/ui/counted';
 import Link from 'next/link';
 import { fromWords, splitMessage } from '@/components/margin/finding-words';
 import { findingKey, marginEntries } from '@/components/margin/margin-entry';
@@ -24,7 +25,7 @@ export function OpenPoints({ findings, threads, plan, circuitId, letter }: OpenP
   const count = (kind: string) => entries.filter((entry) => entry.kind === kind).length;
   return (
     <section aria-labelledby="open-points" className="min-w-0 max-tablet:p-3.5">
-      <h3 id="open-points" className="mb-2 flex flex-wrap items-baseline gap-2.5"><span className="silk text-sm">What is open</span><span className="text-sm text-ink-2">{count('stop')} stops, {count('caution')} cautions, {count('undetermined')} undetermined, {must.length} must answer</span></h3>
+      <h3 id="open-points" className="mb-2 flex flex-wrap items-baseline gap-2.5"><span className="silk text-sm">What is open</span><span className="text-sm text-ink-2">{counted(count('stop'), 'stop')}, {counted(count('caution'), 'caution')}, {count('undetermined')} undetermined, {must.length} must answer</span></h3>
       {entries.length + must.length === 0 ? <p className="text-md text-ink-2">Nothing is open.</p> : null}
       <ul className="space-y-2.5">
         {must.map((thread) => (

@@ -1,3 +1,4 @@
+import { counted } from '@/components/ui/counted';
 import type { Requirement, Revision } from '@/lib/schemas/revision';
 
 export type Result = Requirement['result'];
@@ -54,7 +55,7 @@ function restsOn(id: string, revision: Revision, signer: SignerFacts, refs: read
     case 'newer-revision': return worst === 'satisfied' ? `${revision.letter}; none newer is in review` : `${named} is in review`;
     case 'contributor': return `made by ${revision.contributors.map((person) => person.name).join(', ') || 'nobody known'}`;
     case 'sign-in-again': return worst === 'satisfied' ? 'this session' : 'sign in again, then come back';
-    case 'open-stop': return named === '' ? `${revision.counts.stop} stops stored at the cut` : `stops on ${named}`;
+    case 'open-stop': return named === '' ? `${counted(revision.counts.stop, 'stop')} stored at the cut` : `stops on ${named}`;
     case 'rule-error': return named === '' ? 'every check ended' : `ended in error: ${named}`;
     case 'must-answer': return worst === 'satisfied' ? 'none open' : `${refs.length === 0 ? 1 : new Set(refs).size} open in the margin`;
     case 'objection': {

@@ -1,4 +1,5 @@
 'use client';
+import { counted } from '@/components/ui/counted';
 import { useQuery } from '@tanstack/react-query';
 import Link from 'next/link';
 import { useRouter } from 'next/navigation';
@@ -75,7 +76,7 @@ export function SignOffPage({ letter }: { readonly letter: string }) {
       back={{ href: `/circuits/${circuitId}/revisions/${letter}`, words: `Back to revision ${letter}` }}
       ladder={<div className="max-tablet:hidden"><ReadingRow revisions={revisions.data} revision={revision} shown={holdPoint} onShow={setChosen} act={<p><b className="block font-medium text-silk">{revisionWords(revision, now)}</b>{revision.reviewers.length > 0 ? `asked: ${revision.reviewers.map((one) => one.name).join(', ')}` : 'any mentor who made no part of it'}</p>} /></div>}
       cautions={point && point.volts > touchSafeVolts ? <CautionsLine volts={point.volts} /> : null}
-      status={<StatusStrip lamp={revision.state === 'signed off' ? 'ok' : 'caution'} state={revisionWords(revision, now)} notes={[`${revision.counts.stop} stops, ${revision.counts.caution} cautions stored at the cut`]} right={<span>Signing covers exactly {letter}, hash <span className="figure">{shortHash(revision.contentHash)}</span></span>} />}
+      status={<StatusStrip lamp={revision.state === 'signed off' ? 'ok' : 'caution'} state={revisionWords(revision, now)} notes={[`${counted(revision.counts.stop, 'stop')}, ${counted(revision.counts.caution, 'caution')} stored at the cut`]} right={<span>Signing covers exactly {letter}, hash <span className="figure">{shortHash(revision.contentHash)}</span></span>} />}
     >
       <div className="min-w-0 flex-1 overflow-y-auto bg-film px-6 py-2.5 text-ink max-tablet:p-0">
         <div className="flex flex-wrap items-baseline gap-x-3 pb-2.5 max-tablet:hidden">

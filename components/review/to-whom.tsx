@@ -5,7 +5,8 @@ import type { PersonRef } from '@/lib/schemas/text';
 
 interface ToWhomProps {
   readonly letter: string;
-  readonly members: readonly Member[];
+  /** Null while they load. */
+  readonly members: readonly Member[] | null;
   readonly contributors: readonly PersonRef[];
   readonly self: string;
   readonly named: boolean;
@@ -17,8 +18,8 @@ interface ToWhomProps {
 /** Who is asked: any mentor who made no part of it, or people by name. */
 export function ToWhom({ letter, members, contributors, self, named, onNamed, reviewers, onReviewers }: ToWhomProps) {
   const made = new Set(contributors.map((person) => person.id));
-  const mentors = members.filter((member) => member.role === 'mentor' && !made.has(member.id));
-  const others = members.filter((member) => member.id !== self);
+  const mentors = (members ?? []).filter((member) => member.role === 'mentor' && !made.has(member.id));
+  const others = (members ?? []).filter((member) => member.id !== self);
   const toggle = (id: string, on: boolean) => onReviewers(on ? [...reviewers, id] : reviewers.filter((one) => one !== id));
   return (
     <section aria-labelledby="to-whom" className="border-[1.5px] border-ink max-tablet:border-x-0 max-tablet:border-t-0">
@@ -27,7 +28,7 @@ export function ToWhom({ letter, members, contributors, self, named, onNamed, re
         <legend className="sr-only">To whom</legend>
         <Radio name="whom" checked={!named} onChange={() => onNamed(false)} className="border-b border-rule px-3 py-3">
           <span className="block text-body font-semibold">Any mentor who made no part of {letter}</span>
-          <span className="text-sm text-ink-2">{mentors.length === 0 ? 'This bench has none: it can be reviewed, not signed.' : `It waits for ${mentors.map((mentor) => mentor.name).join(' and ')}.`}</span>
+          <span className="text-sm text-ink-2">{members === null ? 'Looking who that is.' : mentors.length === 0 ? 'This bench has none: it can be reviewed, not signed.' : `It waits for ${mentors.map((mentor) => mentor.name).join(' and ')}.`}</span>
         </Radio>
         <Radio name="whom" checked={named} onChange={() => onNamed(true)} className="px-3 py-3"><span className="text-body font-semibold">Named people only</span></Radio>
       </fieldset>
