@@ -1,4 +1,4 @@
-import { and, eq, gt, lte, ne, or } from 'drizzle-orm';
+import { and, eq, lte, ne, or } from 'drizzle-orm';
 import type { PersonId } from '../authorized';
 import type { Executor } from '../client';
 import { sessions } from '../schema/people';
@@ -6,12 +6,6 @@ import { sessions } from '../schema/people';
 /** Notes that a session was used and moves its idle limit on. */
 export async function touchSession(db: Executor, id: string, now: Date, expiresAt: Date): Promise<void> {
   await db.update(sessions).set({ lastUsedAt: now, expiresAt }).where(eq(sessions.id, id));
-}
-
-export async function ownSessions(db: Executor, person: PersonId, now: Date) {
-  return db.select({ id: sessions.id, signedInAt: sessions.signedInAt, lastUsedAt: sessions.lastUsedAt, userAgent: sessions.userAgent })
-    .from(sessions).where(and(eq(sessions.userId, person), gt(sessions.expiresAt, now), gt(sessions.endsAt, now)))
-    .orderBy(sessions.signedInAt);
 }
 
 /** Ends one of a person's sessions; false when it is none of theirs. */

@@ -1,6 +1,7 @@
 import type { Database } from '@/db/client';
 import { writeAudit } from '@/db/mutations/audit';
-import { endOtherSessions, endSession, ownSessions } from '@/db/mutations/sessions';
+import { endOtherSessions, endSession } from '@/db/mutations/sessions';
+import { ownSessions } from '@/db/queries/sessions';
 import type { Person } from '@/lib/access/caller';
 import { Problem } from '@/lib/errors/problem';
 import type { OwnSession } from '@/lib/schemas/session';

@@ -1,5 +1,5 @@
 import { database } from '@/db/client';
-import { demoCircuit } from '@/db/mutations/guest-links';
+import { demoCircuit } from '@/db/queries/guest-links';
 
 /** Where the landing page's circuit opens for anybody, read only; null where nothing is seeded or the database does not answer. */
 export async function demoHref(): Promise<string | null> {

@@ -1,4 +1,4 @@
-import { demoCircuit } from '@/db/mutations/guest-links';
+import { demoCircuit } from '@/db/queries/guest-links';
 import { guestLinkByHash } from '@/db/queries/standing';
 import { newestRevisionLetter } from '@/db/queries/revisions';
 import type { Database } from '@/db/client';

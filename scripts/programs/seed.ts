@@ -1,6 +1,6 @@
 import { renameSync, writeFileSync } from 'node:fs';
 import { closeDatabase, database } from '@/db/client';
-import { demoCircuit } from '@/db/mutations/guest-links';
+import { demoCircuit } from '@/db/queries/guest-links';
 import { emptyTables } from '@/db/mutations/empty-tables';
 import { peopleEmails } from '@/db/queries/people';
 import { requireSetting } from '@/lib/env/require-setting';

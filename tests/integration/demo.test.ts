@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { demoCircuit } from '@/db/mutations/guest-links';
+import { demoCircuit } from '@/db/queries/guest-links';
 import { editSheet } from '@/lib/rooms/edit-sheet';
 import { circuitGate } from '@/lib/access/gates';
 import { mintPerson } from '@/lib/access/mint';
