@@ -36,14 +36,15 @@ export class SheetWorld {
     public realtime: RunningRealtime,
     readonly people: SheetPeople,
     private readonly timing: Partial<RoomTiming>,
+    private readonly publicUrl: string,
   ) {}
 
-  static async start(timing: Partial<RoomTiming> = {}): Promise<SheetWorld> {
+  static async start(timing: Partial<RoomTiming> = {}, publicUrl = pageOrigin): Promise<SheetWorld> {
     const server = await startTemporaryServer({ durable: true });
     const address = await makeDatabase(server);
     const connection = openDatabase(address);
     const people = await addSheetPeople(connection.db);
-    return new SheetWorld(server, address, connection, await startRealtime(connection.db, timing), people, timing);
+    return new SheetWorld(server, address, connection, await startRealtime(connection.db, timing, publicUrl), people, timing, publicUrl);
   }
 
   get db(): Database {
@@ -63,7 +64,7 @@ export class SheetWorld {
 
   async restartRealtime(): Promise<void> {
     await this.realtime.close();
-    this.realtime = await startRealtime(this.db, this.timing);
+    this.realtime = await startRealtime(this.db, this.timing, this.publicUrl);
   }
 
   url(circuitId: string): string {
@@ -98,9 +99,9 @@ export class SheetWorld {
   }
 }
 
-function startRealtime(db: Database, timing: Partial<RoomTiming>): Promise<RunningRealtime> {
+function startRealtime(db: Database, timing: Partial<RoomTiming>, publicUrl: string): Promise<RunningRealtime> {
   return serveRealtime(
     { db, log: pino({ level: process.env['REALTIME_TEST_LOG'] ?? 'silent' }), contentHash: documentHash, timing: { ...roomTiming, ...timing } },
-    { host: '127.0.0.1', port: 0, secret, publicUrl: pageOrigin, trustProxy: 0 },
+    { host: '127.0.0.1', port: 0, secret, publicUrl, trustProxy: 0 },
   );
 }
