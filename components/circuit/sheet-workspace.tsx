@@ -58,7 +58,7 @@ export function SheetWorkspace({ editor, state, session, snapshot, pane, title, 
   const lit = useMemo(() => new Set((parts ?? []).filter((part) => part.ref !== '' && wanted.split(' ').includes(part.ref)).map((part) => part.id)), [parts, wanted]);
   const drawing = editor !== null && state !== null;
   return (
-    <div ref={area} className="flex min-w-0 flex-1 bg-film">
+    <div className="flex min-w-0 flex-1 bg-film">
       {drawing && !state.readOnly ? <PartDrawer editor={editor} zigzag={zigzag} onZigzag={setZigzag} onTaken={toCanvas} /> : null}
       <div className="relative flex min-w-0 flex-1">
         <div className={pane === 'drawing' ? 'relative flex min-w-0 flex-1' : 'relative flex min-w-0 flex-1 max-tablet:hidden'}>

@@ -29,6 +29,11 @@ export class SheetReader {
     }
   }
 
+  /** Forgets every record: when transactions may have gone unseen. */
+  forgetAll(): void {
+    for (const name of collectionNames) this.cache[name].clear();
+  }
+
   read(): { readonly sheet: Sheet; readonly repairs: readonly Repair[] } {
     const repairs: Repair[] = [];
     const parts = this.collect('parts', repairs);

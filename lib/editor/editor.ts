@@ -30,7 +30,7 @@ const usualReach = 5;
 
 /**
  * The editor of one sheet for one person: tools, commands, selection and history over the shared document. It knows
- * nothing of screens: pointer events come in sheet units, and what to show is `state`.
+ * nothing of screens: pointer events come in sheet units, and what to show is `state`. It is idle until `connect`.
  */
 export class Editor {
   private current: EditorState;
@@ -61,7 +61,14 @@ export class Editor {
       select: new SelectTool(host), wire: new WireTool(host), 'net-name': new NetNameTool(host), note: new NoteTool(host),
       lift: new LiftTool(host), add: new AddTool(host),
     };
-    doc.on('afterTransaction', this.follow);
+  }
+
+  /** Follows the document from now on, and reads what it missed. Returns how to stop. */
+  connect(): () => void {
+    this.doc.on('afterTransaction', this.follow);
+    this.reader.forgetAll();
+    this.read();
+    return () => this.doc.off('afterTransaction', this.follow);
   }
 
   get state(): EditorState {
@@ -150,12 +157,6 @@ export class Editor {
     this.update({});
   }
 
-  destroy(): void {
-    this.doc.off('afterTransaction', this.follow);
-    this.history.destroy();
-    this.listeners.clear();
-  }
-
   private get tool(): Tool {
     return this.tools[this.current.tool];
   }
@@ -200,10 +201,14 @@ export class Editor {
   private readonly follow = (transaction: Y.Transaction): void => {
     if (transaction.changed.size === 0) return;
     this.reader.forget(transaction);
+    this.read();
+  };
+
+  private read(): void {
     const { sheet, repairs } = this.reader.read();
     this.repairs = repairs;
     this.update({ sheet, shown: sheet });
-  };
+  }
 
   private update(change: Partial<EditorState>): void {
     const next = { ...this.current, ...change, canUndo: this.history.canUndo, canRedo: this.history.canRedo };
@@ -217,9 +222,9 @@ export class Editor {
   }
 
   private host(): ToolHost {
-    const editor = this;
+    const now = () => this.current;
     return {
-      get state() { return editor.current; },
+      get state() { return now(); },
       newId: this.newId,
       hit: (press) => this.hit(press),
       run: (name, args) => { (this.run as (name: CommandName, args: unknown) => boolean).call(this, name, args); },

@@ -47,8 +47,4 @@ export class History {
   get canRedo(): boolean {
     return this.manager.redoStack.length > 0;
   }
-
-  destroy(): void {
-    this.manager.destroy();
-  }
 }

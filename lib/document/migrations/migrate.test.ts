@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import * as Y from 'yjs';
+import type * as Y from 'yjs';
 import { decodeDocument, encodeSheet } from '../encode-sheet';
 import { schemaVersion, type StoredSheet } from '../stored-sheet';
 import { gateStage } from '../testing/gate-stage';

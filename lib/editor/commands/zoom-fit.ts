@@ -1,7 +1,7 @@
 import { always, type Command } from './command';
 
 export const zoomFit: Command = {
-  name: 'zoom-fit', title: 'Show the whole sheet', group: 'View', keys: ['Mod+0'], edits: false,
+  name: 'zoom-fit', title: 'Show the whole sheet', group: 'View', keys: ['Home'], edits: false,
   when: always,
   perform: () => ({ camera: 'fit' }),
 };

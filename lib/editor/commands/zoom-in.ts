@@ -1,7 +1,7 @@
 import { always, type Command } from './command';
 
 export const zoomIn: Command = {
-  name: 'zoom-in', title: 'Zoom in', group: 'View', keys: ['Mod+='], edits: false,
+  name: 'zoom-in', title: 'Zoom in', group: 'View', keys: ['PageUp'], edits: false,
   when: always,
   perform: () => ({ camera: 'in' }),
 };

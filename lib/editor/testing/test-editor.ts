@@ -1,4 +1,3 @@
-import { expect } from 'vitest';
 import * as Y from 'yjs';
 import { pinPlaceOf } from '@/lib/document/geometry/pin-place';
 import { snapPoint, type Point } from '@/lib/document/geometry/point';
@@ -15,6 +14,12 @@ import type { KeyPress } from '../keys';
 /** Where a pointer goes: a pin (`Q1:G`), a part's origin (`Q1`) or a place. */
 export type Place = string | Point;
 
+/** Throws when two values differ as JSON. */
+function same(what: string, got: unknown, wanted: unknown): void {
+  const [a, b] = [JSON.stringify(got), JSON.stringify(wanted)];
+  if (a !== b) throw new Error(`${what}: got ${a}, wanted ${b}`);
+}
+
 /** Drives an editor the way a person does, without a browser. */
 export class TestEditor {
   readonly doc = new Y.Doc();
@@ -27,6 +32,7 @@ export class TestEditor {
     let count = 0;
     const prefix = options.idPrefix ?? 'n';
     this.editor = new Editor({ doc: this.doc, readOnly: options.readOnly ?? false, newId: () => `${prefix}${String((count += 1)).padStart(5, '0')}` });
+    this.editor.connect();
   }
 
   get sheet(): Sheet {
@@ -103,27 +109,27 @@ export class TestEditor {
   /** Expects exactly these pins on the net of the first one. */
   expectNet(...pins: readonly string[]): this {
     const net = this.netOf(pins[0] ?? '');
-    expect([...(sheetToNetlist(this.sheet).nets.find((one) => one.name === net)?.pins ?? [])].sort()).toEqual([...pins].sort());
+    same(`Net of ${pins[0]}`, [...(sheetToNetlist(this.sheet).nets.find((one) => one.name === net)?.pins ?? [])].sort(), [...pins].sort());
     return this;
   }
 
   expectSelected(...refs: readonly string[]): this {
     const names = [...this.editor.state.selection].map((id) => this.sheet.parts.find((part) => part.id === id)?.ref ?? id);
-    expect(names.sort()).toEqual([...refs].sort());
+    same('Selection', names.sort(), [...refs].sort());
     return this;
   }
 
   expectRefs(...refs: readonly string[]): this {
-    expect(this.sheet.parts.map((part) => part.ref).filter((ref) => ref !== '').sort()).toEqual([...refs].sort());
+    same('Designators', this.sheet.parts.map((part) => part.ref).filter((ref) => ref !== '').sort(), [...refs].sort());
     return this;
   }
 
   /** What must hold after every command: a reader repairs nothing, no end dangles, everything stands on the grid. */
   expectSound(): this {
     const { sheet, repairs } = readSheet(this.doc);
-    expect(repairs).toEqual([]);
-    expect(sheet).toEqual(this.sheet);
-    for (const item of [...sheet.parts, ...sheet.junctions]) expect(snapPoint(item)).toEqual({ x: item.x, y: item.y });
+    same('Repairs', repairs, []);
+    same('Sheet as stored', sheet, this.sheet);
+    for (const item of [...sheet.parts, ...sheet.junctions]) same('Place on the grid', snapPoint(item), { x: item.x, y: item.y });
     return this;
   }
 
