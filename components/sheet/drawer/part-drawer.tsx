@@ -63,6 +63,7 @@ export const PartDrawer = memo(function PartDrawer({ editor, zigzag, onZigzag, o
   };
   return (
     <aside aria-label="Parts" onKeyDown={onKeyDown} className="groove-r flex w-[196px] flex-none flex-col overflow-y-auto bg-panel max-tablet:hidden print:hidden">
+      <h2 className="sr-only">Parts</h2>
       <div className="relative p-2.5">
         <label className="sr-only" htmlFor="drawer-search">Add a part</label>
         <input ref={search} id="drawer-search" type="search" value={typed} placeholder="Add a part" autoComplete="off" onChange={(event) => setTyped(event.target.value)} className="h-[30px] w-full rounded-key border border-edge bg-film pr-9 pl-2.5 text-md text-ink placeholder:text-ink-2" />
