@@ -45,7 +45,7 @@ test('from a blank gate to a signed-off revision, by a maker, a reviewer and a m
   await test.step('the maker cuts a revision and asks for review', async () => {
     await maker.page.getByRole('button', { name: /^Cut revision/ }).first().click();
     await maker.page.getByLabel('What changed, for the reviewers').fill('22 kΩ from gate to source.');
-    await maker.page.getByRole('dialog').getByRole('button', { name: /^Cut [A-Z]$/ }).click();
+    await maker.page.getByRole('alertdialog').getByRole('button', { name: /^Cut [A-Z]$/ }).click();
     await expect(maker.page).toHaveURL(/\/revisions\/[A-Z]\/ask$/, { timeout: 60_000 });
     await maker.page.getByRole('button', { name: /^Ask for review of/ }).click();
     await expect(maker.page).toHaveURL(/\/revisions\/[A-Z]$/);
