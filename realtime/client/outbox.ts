@@ -66,10 +66,11 @@ export class Outbox {
 
   /** Sends what is not committed through a new socket, or after an outage once more through the same one. */
   start(committed: number, transmit: (clientSeq: number, bytes: Uint8Array) => void): void {
-    this.transmit = transmit;
+    this.transmit = undefined;
     this.acknowledge(committed);
     this.sent = committed;
     this.owedSince = Date.now();
+    this.transmit = transmit;
     this.pump();
   }
 
