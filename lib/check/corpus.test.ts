@@ -1,11 +1,14 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import path from 'node:path';
-import { afterAll, expect, test } from 'vitest';
+import { afterAll, expect, test, vi } from 'vitest';
 import { netlistFromDeck } from '@/lib/netlist/deck/netlist-from-deck';
 import { readDeck } from '@/lib/netlist/deck/read-deck';
 import type { Netlist } from '@/lib/netlist/netlist';
 import { createNodeEngine } from '@/lib/spice/node-engine';
 import { checkNetlist } from './check-netlist';
+
+// The engine takes seconds to start on a busy machine.
+vi.setConfig({ testTimeout: 60_000 });
 
 const folder = path.join(process.cwd(), 'lib/check/corpus');
 const engine = createNodeEngine();

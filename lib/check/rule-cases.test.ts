@@ -1,6 +1,6 @@
 import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import path from 'node:path';
-import { afterAll, describe, expect, test } from 'vitest';
+import { afterAll, describe, expect, test, vi } from 'vitest';
 import { failsByEvidence } from '@/lib/netlist/findings/verdict';
 import { isWorse } from '@/lib/netlist/rules/collect';
 import { applyRemedy } from '@/lib/netlist/rules/apply-remedy';
@@ -11,6 +11,9 @@ import { cachingEngine, PointCache } from './caching-engine';
 import { checkNetlist } from './check-netlist';
 import { netlistOfCase } from './testing/case-netlist';
 import { findingsOf } from './testing/judged-case';
+
+// The engine takes seconds to start on a busy machine.
+vi.setConfig({ testTimeout: 60_000 });
 
 const folder = path.join(process.cwd(), 'lib/netlist/rules');
 const node = createNodeEngine();

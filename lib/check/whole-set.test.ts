@@ -1,6 +1,6 @@
 import { readFileSync } from 'node:fs';
 import path from 'node:path';
-import { afterAll, describe, expect, test } from 'vitest';
+import { afterAll, describe, expect, test, vi } from 'vitest';
 import { buildNetlist } from '@/lib/netlist/connectivity/build-netlist';
 import { netlistFromDeck } from '@/lib/netlist/deck/netlist-from-deck';
 import { readDeck } from '@/lib/netlist/deck/read-deck';
@@ -11,6 +11,9 @@ import { SeededRandom } from '@/lib/netlist/testing/seeded-random';
 import { createNodeEngine } from '@/lib/spice/node-engine';
 import { checkNetlist } from './check-netlist';
 import { checkTopology } from './check-topology';
+
+// The engine takes seconds to start on a busy machine.
+vi.setConfig({ testTimeout: 60_000 });
 
 const engine = createNodeEngine();
 afterAll(() => engine.dispose());

@@ -1,4 +1,4 @@
-import { limitOf } from '../kinds/engine-source';
+import { bleedOhms, limitOf } from '../kinds/engine-source';
 import type { Corner, CurrentProbe, EngineElements } from '../kinds/kind-engine';
 import { kindOf } from '../kinds/kind-registry';
 import { pinReference } from '../connectivity/pin-reference';
@@ -127,7 +127,7 @@ function decode(
   return {
     volts: { 0: 0, ...Object.fromEntries(liveNets.map((net) => [net, values[`v(${names.node(net)})`] ?? Number.NaN])) },
     amps,
-    limited: placed.filter(({ part, elements }) => isLimited(part, elements, sum)).map(({ part }) => part.ref),
+    limited: placed.filter(({ part, elements }) => isLimited(part, elements, sum, (net) => (net === '0' ? 0 : values[`v(${names.node(net)})`] ?? 0))).map(({ part }) => part.ref),
   };
 }
 
@@ -136,8 +136,11 @@ function isOpenAtDc(part: NetlistPart): boolean {
   return part.kind !== 'box' && kindOf(part.kind).engine.edges(part).every(({ stiffness }) => stiffness === 'none');
 }
 
-function isLimited(part: NetlistPart, elements: EngineElements, sum: (probe: CurrentProbe) => number): boolean {
+/** What a limited source gives at its pin is its limit less what its own bleeder takes. */
+function isLimited(part: NetlistPart, elements: EngineElements, sum: (probe: CurrentProbe) => number, volts: (net: string) => number): boolean {
   const limit = limitOf(part, {});
   const probe = Object.values(elements.currents)[0];
-  return limit !== undefined && probe !== undefined && Math.abs(sum(probe)) > limitedFrom * limit;
+  const [plus, minus] = Object.values(part.pins);
+  const bled = Math.abs(volts(plus ?? '0') - volts(minus ?? '0')) / bleedOhms;
+  return limit !== undefined && probe !== undefined && Math.abs(sum(probe)) + bled > limitedFrom * limit;
 }

@@ -6,7 +6,7 @@ import type { EngineContext, EngineElements, KindEngine, PartSetting } from './k
 /** Output resistance of a bench supply below its limit, ohms (docs/engine.md 3.5). */
 const supplyOhms = 0.01;
 /** Across the output of a limited source, so that it has a voltage without a load, ohms. */
-const bleedOhms = 1e6;
+export const bleedOhms = 1e6;
 
 /** Current limit of a source in a run, amps: the hold point's or scenario's, else its own; undefined when it has none. */
 export function limitOf(part: NetlistPart, setting: PartSetting): number | undefined {

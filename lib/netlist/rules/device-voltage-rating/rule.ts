@@ -10,7 +10,7 @@ const parameters = {
   cautionShare: { value: 0.8, unit: '', words: 'share of the rating that a switch or diode may block in normal use', source: 'ECSS-Q-ST-30-11C V_DS 80 %, from memory' },
 } as const;
 
-function deviceOutcomes({ circuit, points, parameters: { cautionShare } }: RuleInput<typeof parameters>, device: Blocking): readonly Outcome[] {
+function deviceOutcomes({ points, parameters: { cautionShare } }: RuleInput<typeof parameters>, device: Blocking): readonly Outcome[] {
   const { part, measure, across, clampVolts } = device;
   const base = { severity: 'stop', target: { device: [part.id] }, refs: [part.ref] } as const;
   const rating = ratingOf(part, device.fact, device.words);
