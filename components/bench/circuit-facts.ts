@@ -16,7 +16,7 @@ const stateWords: Readonly<Record<Circuit['state'], string>> = {
 export function circuitStateWords(circuit: Circuit): string {
   const { newest, draft, reached } = circuit;
   if (!newest) return 'Draft, no revision yet';
-  if (draft) return reached ? `Draft after ${newest.letter}. Not covered by its sign-off` : `Draft after ${newest.letter}`;
+  if (draft) return reached ? `Draft, after ${newest.letter}. Not covered by its sign-off` : `Draft, after ${newest.letter}`;
   if (circuit.state === 'signed off' && reached) return `Signed off to ${voltsWords(reached.volts)}`;
   return stateWords[circuit.state];
 }

@@ -9,13 +9,12 @@ import type { MarginAnchor, SheetGeometry } from '@/components/margin/sheet-geom
 import { stopFlags } from '@/components/margin/stop-flags';
 import { useSelectedEntry } from '@/components/margin/use-selected-entry';
 import { useThreadActions } from '@/components/margin/use-thread-actions';
-import { contentHashOf } from '@/lib/document/nets/sheet-to-netlist';
 import type { Finding } from '@/lib/netlist/findings/finding';
 import type { Anchor } from '@/lib/schemas/thread';
 import { CautionsLine } from './cautions-line';
 import { CircuitFrame } from './circuit-frame';
 import { useCircuitPlace, useMay } from './circuit-context';
-import { draftWords } from './draft-words';
+import { draftWords, movedSince } from './draft-words';
 import { LadderRow } from './ladder-row';
 import { MarginIntro } from './margin-intro';
 import { CircuitLoading } from './page-state';
@@ -63,17 +62,16 @@ export function SheetPage() {
   const lit = useCallback((anchor: MarginAnchor) => (anchor.kind === 'ref' ? refs.has(anchor.ref) : anchor.kind === 'part' ? state?.selection.has(anchor.id) ?? false : false), [refs, state]);
   const jump = useCallback((anchor: MarginAnchor) => { setPane('drawing'); geometry?.reveal(anchor); }, [geometry]);
 
-  const hash = useMemo(() => (sheet ? contentHashOf(sheet) : null), [sheet]);
+  const newest = revisions.data?.[0];
+  const moved = useMemo(() => (sheet ? movedSince(newest, sheet) : circuit.data?.draft === false ? 'not' : 'electrical'), [sheet, newest, circuit.data?.draft]);
 
   if (!circuit.data || !revisions.data || !person) {
     return <CircuitLoading error={circuit.error ?? revisions.error} onRetry={() => { void circuit.refetch(); void revisions.refetch(); }} />;
   }
-  const newest = revisions.data[0];
-  const moved = newest === undefined || (hash === null ? circuit.data.draft : hash !== newest.contentHash);
   const point = points.find((one) => one.name === shown);
   const under = draftWords(newest, moved);
   const noteOn = (anchor: Anchor, words: string) => { setDraft({ anchor, words }); setPane('margin'); };
-  const act = (full: boolean) => <SheetAct entries={entries} plan={plan} revisions={revisions.data} moved={moved} snapshot={snapshot} onPlan={may('edit the sheet') ? () => setPlanning(true) : null} full={full} />;
+  const act = (full: boolean) => <SheetAct entries={entries} plan={plan} revisions={revisions.data} moved={moved !== 'not'} snapshot={snapshot} onPlan={may('edit the sheet') ? () => setPlanning(true) : null} full={full} />;
   return (
     <CircuitFrame
       title={circuit.data.title}
@@ -81,7 +79,7 @@ export function SheetPage() {
       tab="sheet"
       letters={revisions.data.map((one) => one.letter)}
       people={<PeopleOnSheet people={roomPeople(snapshot)} />}
-      ladder={<LadderRow block={<RevisionBlock letter={null} title={under} under={circuit.data.makers.map((maker) => maker.name).join(', ')} />} points={points} shown={shown} onShow={show} signed={signedState(revisions.data, null, moved, new Date())} flags={stopFlags(entries, points)} act={act(false)} />}
+      ladder={<LadderRow block={<RevisionBlock letter={null} title={under} under={circuit.data.makers.map((maker) => maker.name).join(', ')} />} points={points} shown={shown} onShow={show} signed={signedState(revisions.data, null, moved !== 'not', new Date())} flags={stopFlags(entries, points)} act={act(false)} />}
       cautions={point && point.peak > touchSafeVolts ? <CautionsLine volts={point.peak} /> : null}
       foot={<>{session && snapshot ? <RefusedEdits session={session} snapshot={snapshot} /> : null}<PhoneSwitch pane={pane} count={entries.length} onPane={setPane} /></>}
       tools={editor ? <ToolStrip editor={editor} onCommands={() => setListing(!listing)} /> : null}

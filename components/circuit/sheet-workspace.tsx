@@ -18,7 +18,7 @@ import type { Editor } from '@/lib/editor/editor';
 import type { EditorState } from '@/lib/editor/editor-state';
 import type { Revision } from '@/lib/schemas/revision';
 import type { SheetSession, SheetSnapshot } from '@/realtime/client/sheet-session';
-import { draftLetter } from './draft-words';
+import { draftLetter, type Moved } from './draft-words';
 import type { PhonePane } from './phone-switch';
 
 export interface SheetWorkspaceProps {
@@ -29,7 +29,7 @@ export interface SheetWorkspaceProps {
   readonly pane: PhonePane;
   readonly title: string;
   readonly newest: Revision | undefined;
-  readonly moved: boolean;
+  readonly moved: Moved;
   readonly shown: { readonly name: string; readonly volts: number } | null;
   /** Volts of each net at the hold point shown. */
   readonly volts: Readonly<Record<string, number>>;

@@ -38,7 +38,7 @@ export function RevisionsPage() {
   const moved = newest !== undefined && draft;
   const letter = nextRevisionLetter(newest?.letter ?? null);
   const objections = newest?.objections ?? [];
-  const under = draftWords(newest, moved);
+  const under = draftWords(newest, moved ? 'electrical' : 'not');
   const volts = holdPoints.find((point) => point.name === shown)?.volts ?? 0;
   return (
     <CircuitFrame
