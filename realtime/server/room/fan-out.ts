@@ -1,3 +1,5 @@
+import { initialsOf } from '@/lib/review/naming';
+import type { PresenceEntry } from '@/realtime/presence-fields';
 import { encodeFrame, type RoomSaving } from '@/realtime/protocol';
 import type { Member } from './member';
 import type { RoomInstance } from './room-instance';
@@ -16,7 +18,8 @@ export interface CommittedEdit {
 export class FanOut {
   private readonly members = new Set<Member>();
   readonly presence = new PresenceMap((entries) => {
-    this.toAll(encodeFrame({ kind: 'presence', text: JSON.stringify(entries) }), true);
+    const [frame, forGuests] = [presenceFrame(entries), presenceFrame(entries.map(asGuestsSee))];
+    for (const member of this.members) member.send(member.role === 'guest' ? forGuests : frame, true);
   });
 
   get size(): number {
@@ -29,7 +32,8 @@ export class FanOut {
 
   add(member: Member): void {
     this.members.add(member);
-    member.send(encodeFrame({ kind: 'presence', text: JSON.stringify(this.presence.all()) }));
+    const entries = this.presence.all();
+    member.send(presenceFrame(member.role === 'guest' ? entries.map(asGuestsSee) : entries));
     this.presence.join(member);
   }
 
@@ -54,10 +58,14 @@ export class FanOut {
   }
 
   event(topic: string, data: unknown): void {
-    this.toAll(encodeFrame({ kind: 'event', topic, text: JSON.stringify(data) }));
+    const frame = encodeFrame({ kind: 'event', topic, text: JSON.stringify(data) });
+    for (const member of this.members) member.send(frame);
   }
+}
 
-  private toAll(frame: Uint8Array, droppable = false): void {
-    for (const member of this.members) member.send(frame, droppable);
-  }
+const presenceFrame = (entries: readonly PresenceEntry[]) => encodeFrame({ kind: 'presence', text: JSON.stringify(entries) });
+
+/** Guests see people as initials, each other as they are called. */
+function asGuestsSee(entry: PresenceEntry): PresenceEntry {
+  return entry.person === null ? entry : { ...entry, name: initialsOf(entry.name) };
 }

@@ -2,6 +2,7 @@ import * as Y from 'yjs';
 import { appendRows } from '@/db/mutations/room-append';
 import { openInstance } from '@/db/mutations/room-instance';
 import { readUpdatesAfter } from '@/db/queries/room-state';
+import { documentHardBytes } from '@/lib/document/admission/sheet-limits';
 import type { CloseReason } from '@/realtime/close-codes';
 import { limits, maxEditBytes } from '@/realtime/limits';
 import { encodeFrame, type Hello, type RoomSaving } from '@/realtime/protocol';
@@ -34,6 +35,8 @@ export class Room {
   private why = '';
   private rowsSince: number;
   private bytesSince: number;
+  /** At most this large when encoded; worked out anew when it nears the limit. */
+  private documentBytes: number;
 
   constructor(
     readonly id: string,
@@ -46,6 +49,7 @@ export class Room {
     this.parts = new StateParts(committed);
     this.rowsSince = since.rows;
     this.bytesSince = since.bytes;
+    this.documentBytes = Y.encodeStateAsUpdate(committed).length;
     this.waitForQuiet();
   }
 
@@ -79,6 +83,7 @@ export class Room {
 
   /** Lets a member in: welcome, the sheet in parts, presence. From here on it gets every committed edit. */
   join(member: Member, hello: Pick<Hello, 'stateVector' | 'resume'>): void {
+    if (this.current === 'closed') return member.close('restarting');
     const parts = this.parts.frames(this.head, hello.stateVector, hello.resume);
     const instance = member.instance;
     if (instance) {
@@ -89,7 +94,7 @@ export class Room {
     member.send(encodeFrame({
       kind: 'welcome', role: member.role, grantVersion: member.grant.version, headSeq: this.head,
       committed: instance?.committed ?? 0, connection: member.connection,
-      saving: this.current === 'closed' ? 'draining' : this.current, why: this.why, maxEditBytes,
+      saving: this.current, why: this.why, maxEditBytes,
     }));
     member.sendBulk(parts);
     this.fan.add(member);
@@ -111,6 +116,12 @@ export class Room {
 
   /** Tries an edit on the candidate. A refusal leaves no trace of it there. */
   admit(bytes: Uint8Array, mayWrite: (clientId: number) => boolean): Verdict {
+    if (this.documentBytes + bytes.length > documentHardBytes) {
+      this.documentBytes = Y.encodeStateAsUpdate(this.committed).length;
+      if (this.documentBytes + bytes.length > documentHardBytes) {
+        return { ok: false, reason: 'size', words: 'This sheet is as large as a sheet can be. Delete something first.' };
+      }
+    }
     const verdict = this.candidate.admit(bytes, mayWrite);
     if (!verdict.ok) this.rebuild();
     return verdict;
@@ -210,6 +221,7 @@ export class Room {
     instance.commit(clientSeq, this.head);
     this.rowsSince += 1;
     this.bytesSince += bytes.length;
+    this.documentBytes += bytes.length;
     this.fan.committed({ seq: this.head, clientSeq, instance, connection, bytes });
   }
 
