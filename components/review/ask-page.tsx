@@ -80,7 +80,7 @@ export function AskPage({ letter }: { readonly letter: string }) {
           </div>
         </div>
         <div className="flex flex-none flex-wrap items-center gap-3 border-t-[1.5px] border-ink bg-film px-6 py-3 max-tablet:px-3.5">
-          <Button tone="primary" size="large" busy={busy} refused={asked ? `${letter} is ${revisionWords(revision, now).toLowerCase()}` : named && reviewers.length === 0 ? 'name somebody' : null} reasonBeside onClick={() => void send()}>Ask for review of {letter}</Button>
+          <Button tone="primary" size="large" busy={busy} refused={asked ? `${letter} is ${revisionWords(revision, now).replace(/^\p{Lu}/u, (letter) => letter.toLowerCase())}` : named && reviewers.length === 0 ? 'name somebody' : null} reasonBeside onClick={() => void send()}>Ask for review of {letter}</Button>
           <ButtonLink href={`/circuits/${circuitId}/revisions/${letter}`} size="large">Not yet</ButtonLink>
           {error ? <p role="alert" className="text-sm text-stop-ink">{error}</p> : null}
           <p className="ml-auto max-w-[640px] text-sm text-ink-2 max-tablet:hidden">{letter} goes from cut to <b className="font-semibold text-ink">in review</b>. A later revision sent for review supersedes it.</p>

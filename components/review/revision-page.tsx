@@ -65,7 +65,7 @@ export function RevisionPage({ letter, tab = 'revisions' }: { readonly letter: s
   return (
     <CircuitFrame
       title={circuit.data.title}
-      under={`Revision ${letter}, ${revisionWords(revision, now).toLowerCase()}`}
+      under={`Revision ${letter}, ${revisionWords(revision, now).replace(/^\p{Lu}/u, (letter) => letter.toLowerCase())}`}
       tab={tab}
       letters={revisions.data.map((one) => one.letter)}
       back={{ href: `/circuits/${circuitId}/revisions`, words: 'Back to the revisions' }}
