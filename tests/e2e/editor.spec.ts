@@ -111,5 +111,5 @@ test('the power-up plan is typed as people write it and kept as one edit', async
   await circuit.saved();
   await expect(circuit.ladder).toBeVisible();
   const kept = await (await context.request.get(`/api/circuits/${id}`)).json() as { readonly holdPoints: readonly object[] };
-  expect(kept.holdPoints).toEqual([{ name: '12', volts: 12, amps: 0.5, source: 'V1' }]);
+  expect(kept.holdPoints).toEqual([{ name: '12 V', volts: 12, amps: 0.5, source: 'V1' }]);
 });

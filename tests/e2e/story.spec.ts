@@ -63,7 +63,7 @@ test('from a blank gate to a signed-off revision, by a maker, a reviewer and a m
     await form.getByLabel(/I have read the sheet/).check();
     await form.getByRole('button', { name: new RegExp(`Sign off ${letter} to 15 V`) }).click();
     await page.goto(path);
-    await expect(page.getByText(/signed off to 15 V/i).first()).toBeVisible();
+    await expect(page.getByText(/signed off to 15 V/i).filter({ visible: true }).first()).toBeVisible();
   });
 
   await test.step('an edit makes a draft that no sign-off covers; the revision stays signed', async () => {
@@ -72,8 +72,8 @@ test('from a blank gate to a signed-off revision, by a maker, a reviewer and a m
     await maker.select('TP1');
     await maker.page.keyboard.press('Delete');
     await maker.saved();
-    await expect(maker.page.getByText(/draft, after/i).first()).toBeVisible();
+    await expect(maker.page.getByText(/draft, after/i).filter({ visible: true }).first()).toBeVisible();
     await maker.page.goto(path);
-    await expect(maker.page.getByText(/signed off to 15 V/i).first()).toBeVisible();
+    await expect(maker.page.getByText(/signed off to 15 V/i).filter({ visible: true }).first()).toBeVisible();
   });
 });

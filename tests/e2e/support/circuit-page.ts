@@ -36,7 +36,7 @@ export class CircuitPage {
   }
 
   async checked(): Promise<void> {
-    await expect(this.margin.getByText(/\d+ checks on/)).toBeVisible({ timeout: 45_000 });
+    await expect(this.margin.getByText(/\d+ checks on [^,]+, \d/)).toBeVisible({ timeout: 45_000 });
   }
 
   async saved(): Promise<void> {
