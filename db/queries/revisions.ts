@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, inArray, lt } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, lt, or } from 'drizzle-orm';
 import type { CircuitId, RevisionId } from '../authorized';
 import type { Executor } from '../client';
 import { findings, revisionContributors, revisionHoldPoints, revisionReviewers, revisions } from '../schema/revisions';
@@ -50,13 +50,16 @@ export async function revisionFindings(db: Executor, revision: RevisionId) {
   return rows.map((row) => row.finding);
 }
 
-/** What a sign-off asks of the stored outcomes, for several revisions. */
+/** What a sign-off asks of the stored outcomes, for several revisions: all that do not simply pass, and every run of `lifted-lead`. */
 export async function outcomesOf(db: Executor, revisionIds: readonly string[]) {
   if (revisionIds.length === 0) return [];
   return db.select({
     revisionId: findings.revisionId, fingerprint: findings.fingerprint, rule: findings.rule, outcome: findings.outcome,
     severity: findings.severity, refs: findings.refs, fromVolts: findings.fromVolts,
-  }).from(findings).where(inArray(findings.revisionId, [...revisionIds])).orderBy(asc(findings.position));
+  }).from(findings).where(and(
+    inArray(findings.revisionId, [...revisionIds]),
+    or(inArray(findings.outcome, ['fail', 'undetermined', 'error']), eq(findings.rule, 'lifted-lead')),
+  )).orderBy(asc(findings.position));
 }
 
 export async function holdPointsOf(db: Executor, revisionIds: readonly string[]) {

@@ -18,6 +18,10 @@ async function account(): Promise<{ id: string; email: string }> {
   await inTransaction(world.db, async (tx) => insertPerson(tx, { id, email, name: 'Ines Okafor', passwordHash: await hashPassword(password) }));
   return { id, email };
 }
+const spent = (start: NodeJS.CpuUsage): number => {
+  const { user, system } = process.cpuUsage(start);
+  return user + system;
+};
 const cookieOf = (headers: Headers) => (headers.get('set-cookie') ?? '').split(';')[0] ?? '';
 
 beforeAll(async () => { world = await ApiWorld.start(); });
@@ -48,12 +52,12 @@ describe('signing in', () => {
   it('does the same work whether or not the account exists', async () => {
     const { email } = await account();
     const fastest = { [email]: Infinity, 'nobody@northgate.test': Infinity };
-    // In turn, so that whatever else the machine does meets both.
+    // Processor time, in turn: what else the machine does meanwhile counts for neither.
     for (let round = 0; round < 8; round += 1) {
       for (const address of Object.keys(fastest)) {
-        const start = performance.now();
+        const start = process.cpuUsage();
         await world.call(null, signInCall, { body: { email: address, password: 'wrong' }, headers: from() });
-        fastest[address] = Math.min(fastest[address] ?? Infinity, performance.now() - start);
+        fastest[address] = Math.min(fastest[address] ?? Infinity, spent(start));
       }
     }
     const [known = 0, unknown = 0] = Object.values(fastest);
