@@ -1,4 +1,4 @@
-import type { Netlist } from '../netlist';
+import type { Netlist, NetlistPart } from '../netlist';
 import type { OperatingPoint, Refusal } from '../points/point';
 import type { ControlPin } from '../precheck/precheck';
 import { buildEngineDeck, type DeckOptions, type EngineDeck } from './build-engine-deck';
@@ -52,4 +52,9 @@ function undrivenRefusal(undriven: readonly ControlPin[]): Refusal {
     nodes: [...new Set(undriven.map(({ net }) => net))],
     parts: [...new Set(undriven.map(({ part }) => part.ref))],
   };
+}
+
+/** A base with a series resistor from a pin is no floating input, even while the pin lets go (docs/engine.md 3.6). */
+function isBaseBehindResistor({ parts }: Netlist, { kind }: NetlistPart, net: string): boolean {
+  return (kind === 'npn' || kind === 'pnp') && parts.some((other) => other.kind === 'resistor' && Object.values(other.pins).includes(net));
 }
