@@ -4,7 +4,7 @@ import { Button } from '@/components/ui/button';
 import type { Sheet } from '@/lib/document/records';
 import type { PlannedPoint } from '@/lib/document/plan/set-plan';
 import type { Editor } from '@/lib/editor/editor';
-import { editableQuantity } from '@/lib/netlist/quantity/format-quantity';
+import { editableQuantity, formatQuantity, thinSpace } from '@/lib/netlist/quantity/format-quantity';
 import { parseQuantity } from '@/lib/netlist/quantity/parse-quantity';
 import { sourcesOf } from './sheet-sources';
 
@@ -35,7 +35,7 @@ function read(rows: readonly Row[]): Read {
     if (!volts.ok) return { row: row.key, reason: volts.reason };
     const amps = parseQuantity(row.amps, { unit: 'A', subject: 'a current limit' });
     if (!amps.ok) return { row: row.key, reason: amps.reason };
-    points.push({ name: row.name.trim() || row.volts.trim(), volts: volts.value, amps: amps.value, source: row.source || undefined, scenario: row.scenario || undefined });
+    points.push({ name: row.name.trim() || formatQuantity(volts.value, 'V').replace(thinSpace, ' '), volts: volts.value, amps: amps.value, source: row.source || undefined, scenario: row.scenario || undefined });
   }
   return { points: points.sort((a, b) => a.volts - b.volts) };
 }

@@ -9,7 +9,12 @@ export interface PlannedPoint {
   readonly amps: number;
 }
 
-export type PlanAnswer = { readonly ok: true; readonly sheet: Sheet } | { readonly ok: false; readonly reason: string; readonly index: number };
+export type PlanField = 'name' | 'scenario' | 'source' | 'volts' | 'amps' | 'ambient';
+
+export type PlanAnswer =
+  | { readonly ok: true; readonly sheet: Sheet }
+  /** Why not, and at which row and field. */
+  | { readonly ok: false; readonly reason: string; readonly index: number; readonly field: PlanField };
 
 /**
  * Replaces the power-up plan. Points ascend by volts and have unique names; a scenario not yet known is made, empty; a
@@ -19,16 +24,16 @@ export function setPlan(sheet: Sheet, points: readonly PlannedPoint[], newId: ()
   const scenarios: ScenarioRecord[] = [...sheet.scenarios];
   const holdPoints: HoldPointRecord[] = [];
   for (const [index, { name: typed, scenario, source, volts, amps }] of points.entries()) {
-    const no = (reason: string): PlanAnswer => ({ ok: false, reason, index });
+    const no = (field: PlanField, reason: string): PlanAnswer => ({ ok: false, reason, index, field });
     const name = typed.trim();
-    if (holdPoints.some((point) => point.name === name)) return no(`Two hold points are called ${name}. Each needs a name of its own.`);
+    if (holdPoints.some((point) => point.name === name)) return no('name', `Two hold points are called ${name}. Each needs a name of its own.`);
     const last = holdPoints.at(-1);
-    if (last && volts < last.volts) return no(`${name} is below ${last.name}. Hold points ascend by volts.`);
+    if (last && volts < last.volts) return no('volts', `${name} is below ${last.name}. Hold points ascend by volts.`);
     const part = source === undefined ? undefined : sheet.parts.find((one) => one.ref === source);
-    if (source !== undefined && !part) return no(`There is no ${source} on the sheet.`);
+    if (source !== undefined && !part) return no('source', `The sheet has no part ${source}.`);
     if (scenario !== undefined && !scenarios.some((one) => one.name === scenario)) {
       const made = scenarioRecordSchema.safeParse({ id: newId(), name: scenario, ambient: 25, values: {} });
-      if (!made.success) return no('A scenario needs a name of one line, at most 120 characters.');
+      if (!made.success) return no('scenario', 'A scenario needs a name of one line, at most 120 characters.');
       scenarios.push(made.data);
     }
     const parsed = holdPointRecordSchema.safeParse({
@@ -36,7 +41,10 @@ export function setPlan(sheet: Sheet, points: readonly PlannedPoint[], newId: ()
       ...(part ? { source: part.id } : {}),
       ...(scenario === undefined ? {} : { scenario: scenarios.find((one) => one.name === scenario)?.id }),
     });
-    if (!parsed.success) return no(planProblem(parsed.error.issues[0]?.path[0]));
+    if (!parsed.success) {
+      const field = parsed.error.issues[0]?.path[0];
+      return no(field === 'volts' || field === 'amps' ? field : 'name', planProblem(field));
+    }
     holdPoints.push(parsed.data);
   }
   return { ok: true, sheet: { ...sheet, scenarios, holdPoints } };
@@ -53,10 +61,10 @@ export function putScenario(sheet: Sheet, scenario: ScenarioRecord): PlanAnswer 
   const parsed = scenarioRecordSchema.safeParse({ ...scenario, name: scenario.name.trim() });
   if (!parsed.success) {
     const ambient = parsed.error.issues[0]?.path[0] === 'ambient';
-    return { ok: false, index: 0, reason: ambient ? 'The ambient temperature lies from -55 to 150 °C.' : 'A scenario needs a name of one line, at most 120 characters.' };
+    return { ok: false, index: 0, field: ambient ? 'ambient' : 'name', reason: ambient ? 'The ambient temperature lies from -55 to 150 °C.' : 'A scenario needs a name of one line, at most 120 characters.' };
   }
   if (sheet.scenarios.some((other) => other.id !== scenario.id && other.name === parsed.data.name)) {
-    return { ok: false, index: 0, reason: `Another scenario is called ${parsed.data.name}.` };
+    return { ok: false, index: 0, field: 'name', reason: `Another scenario is called ${parsed.data.name}.` };
   }
   const known = sheet.scenarios.some((other) => other.id === scenario.id);
   const scenarios = known ? sheet.scenarios.map((other) => (other.id === scenario.id ? parsed.data : other)) : [...sheet.scenarios, parsed.data];
