@@ -1,4 +1,4 @@
-import type { Netlist, NetlistPart } from '../netlist';
+import type { Netlist } from '../netlist';
 import type { OperatingPoint, Refusal } from '../points/point';
 import type { ControlPin } from '../precheck/precheck';
 import { buildEngineDeck, type DeckOptions, type EngineDeck } from './build-engine-deck';
@@ -25,6 +25,7 @@ export async function runPoint(engine: PointEngine, netlist: Netlist, options: D
     leakyPoint(engine, netlist, { ...options, gateLeakage: -1 }),
   ]);
   const undriven = deck.weakControls.filter((control) => {
+    if (isBaseBehindResistor(netlist, control)) return false;
     const card = netlist.models.find(({ name }) => name.toLowerCase() === control.part.model?.toLowerCase());
     return isUndriven(control, { plain: run.op, into, outOf }, card);
   });
@@ -55,6 +56,6 @@ function undrivenRefusal(undriven: readonly ControlPin[]): Refusal {
 }
 
 /** A base with a series resistor from a pin is no floating input, even while the pin lets go (docs/engine.md 3.6). */
-function isBaseBehindResistor({ parts }: Netlist, { kind }: NetlistPart, net: string): boolean {
+function isBaseBehindResistor({ parts }: Netlist, { part: { kind }, net }: ControlPin): boolean {
   return (kind === 'npn' || kind === 'pnp') && parts.some((other) => other.kind === 'resistor' && Object.values(other.pins).includes(net));
 }
