@@ -12,6 +12,17 @@ export function fitView(bounds: Box, width: number, height: number): View {
   return { scale, x: (bounds.left + bounds.right) / 2 - width / scale / 2, y: (bounds.top + bounds.bottom) / 2 - height / scale / 2 };
 }
 
+/** Below this scale words cannot be read on a phone. */
+const readable = 0.62;
+
+/** What a viewer starts with: all of the drawing, or on a phone its right half at a size that can be read. */
+function startView(bounds: Box, width: number, height: number): View {
+  const all = fitView(bounds, width, height);
+  if (width >= 720 || all.scale >= readable) return all;
+  const scale = Math.min(1, Math.max(readable, height / (bounds.bottom - bounds.top)));
+  return { scale, x: bounds.right - width / scale, y: (bounds.top + bounds.bottom) / 2 - height / scale / 2 };
+}
+
 function zoomed(view: View, factor: number, at: Point): View {
   const scale = Math.min(most, Math.max(least, view.scale * factor));
   return { scale, x: view.x + at.x / view.scale - at.x / scale, y: view.y + at.y / view.scale - at.y / scale };
@@ -39,7 +50,7 @@ export function useView(bounds: Box): ViewControl {
   const [size, setSize] = useState({ width: 0, height: 0 });
   const [own, setOwn] = useState<View | null>(null);
   const pointers = useRef(new Map<number, Point>());
-  const view = own ?? fitView(bounds, size.width || 860, size.height || 610);
+  const view = own ?? startView(bounds, size.width || 860, size.height || 610);
   const current = useRef(view);
   useEffect(() => { current.current = view; });
 
@@ -67,7 +78,7 @@ export function useView(bounds: Box): ViewControl {
   return {
     ref, view, ...size,
     zoom: (factor) => setOwn(zoomed(current.current, factor, middle())),
-    fit: () => setOwn(null),
+    fit: () => setOwn(fitView(bounds, size.width, size.height)),
     centre: (point) => setOwn((before) => {
       const now = before ?? current.current;
       return { ...now, x: point.x - size.width / now.scale / 2, y: point.y - size.height / now.scale / 2 };

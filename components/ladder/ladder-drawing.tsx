@@ -1,5 +1,5 @@
 import { HatchMark } from './hatch-mark';
-import { legendWidth, placeFeet, placeLegend } from './ladder-legend';
+import { placeFeet, placeLegend } from './ladder-legend';
 import { touchSafeVolts, type LadderPoint } from './ladder-point';
 import { LadderRail } from './ladder-rail';
 import type { LadderScale } from './ladder-scale';
@@ -24,9 +24,8 @@ export function LadderDrawing({ points, shown, signed, flags, scale, width, narr
   const { x } = scale;
   const byName = new Map(points.map((point) => [point.name, point]));
   const shownPoint = shown === null ? undefined : byName.get(shown);
-  const status = narrow ? signed.short : signed.words.toUpperCase();
   const statusLeft = narrow ? 14 : 8;
-  const stands = placeLegend([
+  const { stands, state } = placeLegend([
     ...(shownPoint ? [{ id: 'shown', x: x(shownPoint.peak), half: 10, words: `SHOWN AT ${voltsWords(shownPoint.volts)}`, short: voltsWords(shownPoint.volts), prefer: x(shownPoint.peak) > width * 0.6 ? 'left' as const : 'right' as const }] : []),
     ...flags.flatMap((flag) => {
       const point = byName.get(flag.holdPoint);
@@ -34,7 +33,7 @@ export function LadderDrawing({ points, shown, signed, flags, scale, width, narr
       return point ? [{ id: flag.holdPoint, x: x(point.peak), half: 9, words: `${flag.numbers.length > 1 ? 'STOPS' : 'STOP'} ${numbers}`, short: numbers, prefer: 'right' as const }] : [];
     }),
     { id: 'limit', x: x(touchSafeVolts) - (narrow ? 0 : 30), half: 13, words: '60 V LIMIT', prefer: 'right' as const },
-  ], { from: 0, to: width }, [{ from: statusLeft, to: statusLeft + legendWidth(status) }]);
+  ], { from: 0, to: width }, narrow ? [signed.short] : [signed.words.toUpperCase(), signed.short], statusLeft);
   const stand = (id: string) => stands.find((placed) => placed.id === id);
   const words = (id: string, half: number, className: string) => {
     const placed = stand(id);
@@ -76,7 +75,7 @@ export function LadderDrawing({ points, shown, signed, flags, scale, width, narr
           </g>
         );
       })}
-      <text x={statusLeft} y="15" className={`${legend} ${signed.to === null ? 'fill-silk-2' : 'fill-signed-ink'}`}>{status}</text>
+      <text x={statusLeft} y="15" className={`${legend} ${signed.to === null ? 'fill-silk-2' : 'fill-signed-ink'}`}>{state}</text>
       {narrow ? null : (
         <>
           <text x="82" y="33" textAnchor="end" className={`${legend} fill-silk`}>SIGNED OFF</text>

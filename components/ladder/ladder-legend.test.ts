@@ -5,17 +5,17 @@ const row = { from: 0, to: 900 };
 
 describe('placeLegend', () => {
   it('keeps words on their preferred side while there is room', () => {
-    const [flag] = placeLegend([{ id: 'a', x: 300, half: 9, words: 'STOPS 1, 2', prefer: 'right' }], row);
+    const { stands: [flag] } = placeLegend([{ id: 'a', x: 300, half: 9, words: 'STOPS 1, 2', prefer: 'right' }], row);
     expect(flag).toMatchObject({ x: 300, side: 'right', words: 'STOPS 1, 2' });
   });
 
   it('turns words to the other side at the end of the row', () => {
-    const [needle] = placeLegend([{ id: 'a', x: 880, half: 9, words: 'SHOWN AT 325 V', prefer: 'right' }], row);
+    const { stands: [needle] } = placeLegend([{ id: 'a', x: 880, half: 9, words: 'SHOWN AT 325 V', prefer: 'right' }], row);
     expect(needle?.side).toBe('left');
   });
 
   it('moves a mark aside when another stands at the same voltage', () => {
-    const [needle, flag] = placeLegend([
+    const { stands: [needle, flag] } = placeLegend([
       { id: 'needle', x: 300, half: 9, words: 'SHOWN AT 36 V', prefer: 'right' },
       { id: 'flag', x: 300, half: 9, words: 'STOP 2', prefer: 'right' },
     ], row);
@@ -24,7 +24,7 @@ describe('placeLegend', () => {
   });
 
   it('never lets two texts overlap', () => {
-    const placed = placeLegend([0, 1, 2, 3, 4, 5].map((index) => ({
+    const { stands: placed } = placeLegend([0, 1, 2, 3, 4, 5].map((index) => ({
       id: String(index), x: 200 + index * 40, half: 9, words: 'STOPS 1, 2, 3', short: '1, 2, 3', prefer: 'right' as const,
     })), row);
     const spans = placed.flatMap((stand) => (stand.words === null ? [] : [stand.side === 'right'
@@ -32,6 +32,12 @@ describe('placeLegend', () => {
       : { from: stand.x - 9 - legendWidth(stand.words), to: stand.x - 9 }]));
     for (const a of spans) for (const b of spans) if (a !== b) expect(a.to <= b.from || a.from >= b.to).toBe(true);
   });
+});
+
+it('gives the state its short form rather than let a mark run into it', () => {
+  const { state, stands: [mark] } = placeLegend([{ id: 'limit', x: 120, half: 13, words: '60 V LIMIT', prefer: 'right' }], row, ['B SIGNED OFF TO 15 V, SHEET UNCHANGED', 'TO 15 V'], 8);
+  expect(state).toBe('TO 15 V');
+  expect(mark?.x).toBe(120);
 });
 
 describe('placeFeet', () => {

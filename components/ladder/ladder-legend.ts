@@ -31,12 +31,19 @@ export function legendWidth(words: string): number {
 
 const gap = 5;
 
+interface Legend {
+  readonly stands: readonly PlacedStand[];
+  /** The state's words that found room at the row's left, or null. */
+  readonly state: string | null;
+}
+
 /**
- * Places marks and their words in one row so that nothing overlaps. Earlier stands win; words go to the other side, then to
- * their short form, then away. A mark that meets another steps to its left.
+ * Places marks, the state at the left, and the words of marks in one row so that nothing overlaps. A mark that meets an earlier
+ * one steps to its left. The state takes the first of its forms that is clear of all marks; words go to the other side, then to
+ * their short form, then away.
  */
-export function placeLegend(stands: readonly Stand[], row: Span, taken: readonly Span[] = []): readonly PlacedStand[] {
-  const spans: Span[] = [...taken];
+export function placeLegend(stands: readonly Stand[], row: Span, states: readonly string[] = [], stateLeft = row.from): Legend {
+  const spans: Span[] = [];
   const free = (span: Span) => span.from >= row.from && span.to <= row.to && spans.every((other) => span.to <= other.from || span.from >= other.to);
 
   const marks = stands.map((stand) => {
@@ -47,7 +54,10 @@ export function placeLegend(stands: readonly Stand[], row: Span, taken: readonly
     return { ...stand, x };
   });
 
-  return marks.map(({ id, x, half, words, short, prefer }) => {
+  const state = states.find((words) => free({ from: stateLeft, to: stateLeft + legendWidth(words) + gap })) ?? null;
+  if (state !== null) spans.push({ from: stateLeft, to: stateLeft + legendWidth(state) + gap });
+
+  const placed = marks.map(({ id, x, half, words, short, prefer }): PlacedStand => {
     const sides = prefer === 'left' ? (['left', 'right'] as const) : (['right', 'left'] as const);
     for (const text of [words, short]) {
       if (text === undefined) continue;
@@ -61,6 +71,7 @@ export function placeLegend(stands: readonly Stand[], row: Span, taken: readonly
     }
     return { id, x, words: null, side: prefer };
   });
+  return { stands: placed, state };
 }
 
 interface Foot {

@@ -3,7 +3,7 @@ import { Icon } from '@/components/ui/icon';
 import { RequirementMark } from '@/components/ui/requirement-mark';
 import { classNames } from '@/components/ui/class-names';
 import type { Revision } from '@/lib/schemas/revision';
-import type { RequirementRow } from './requirement-words';
+import { refuses, type RequirementRow } from './requirement-words';
 
 interface HoldPointKeysProps {
   readonly revision: Revision;
@@ -51,7 +51,7 @@ export function RequirementList({ rows, holdPoint }: { readonly rows: readonly R
         return (
           <li key={row.id} className="grid min-h-[42px] grid-cols-[20px_1fr] items-center gap-x-4 border-b border-rule px-3.5 py-1.5 text-md text-ink">
             <RequirementMark result={at?.result ?? 'not applicable'} size={18} />
-            <span>{row.words} <span className="text-sm text-ink-2">{row.restsOn}</span></span>
+            <span>{row.words} <span className="text-sm text-ink-2">{refuses(row.worst) && !refuses(at?.result ?? 'satisfied') ? '' : row.restsOn}</span></span>
           </li>
         );
       })}
