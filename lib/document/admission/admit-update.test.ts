@@ -62,7 +62,7 @@ describe('admission of one update', () => {
     expect(refusal(new Uint8Array(updateBytesLimit + 1))).toBe('size');
     expect(refusal(edit((doc) => collectionOf(doc, 'parts').get('R1')?.set('fact:note', 'x'.repeat(70_000))))).toBe('size');
     expect(refusal(edit((doc) => {
-      for (let index = 0; index < 60; index += 1) {
+      for (let index = 0; index < 70; index += 1) {
         collectionOf(doc, 'scenarios').set(`s${index}`, recordMapOf({ name: `${index}`, ambient: 25 }));
       }
     }))).toBe('size');

@@ -21,7 +21,7 @@ const knownTypes = new Set<string>([...collectionNames, 'library', 'meta']);
  */
 export function admitUpdate(candidate: Y.Doc, update: Uint8Array): Admission {
   if (update.byteLength > updateBytesLimit) {
-    return { ok: false, reason: 'size', words: 'This edit is larger than 1 MiB. Paste or import it in smaller pieces.' };
+    return { ok: false, reason: 'size', words: 'This edit is larger than 4 MiB. Paste or import it in smaller pieces.' };
   }
   sharedTypesOf(candidate);
   let touched: Y.Transaction | null = null;

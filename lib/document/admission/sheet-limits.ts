@@ -1,8 +1,8 @@
 import type { CollectionName } from '../stored-sheet';
 
-/** How many records one sheet may hold: the deck reader's ceiling of 1,000 parts with room for marks and notes. */
+/** How many records one sheet may hold: the deck reader's ceiling of 1,000 parts, a 0 V symbol or net name at each of their pins, notes. */
 export const recordLimits: Readonly<Record<CollectionName, number>> = {
-  parts: 4_000, wires: 8_000, junctions: 8_000, scenarios: 50, holdPoints: 40,
+  parts: 12_000, wires: 16_000, junctions: 16_000, scenarios: 60, holdPoints: 60,
 };
 
 /** Model cards and subcircuits of one sheet's library. */
@@ -15,5 +15,8 @@ export const recordBytesLimit = 64 * 1_024;
 export const documentSoftBytes = 5 * 1_024 * 1_024;
 export const documentHardBytes = 20 * 1_024 * 1_024;
 
-/** Bytes of one edit. */
-export const updateBytesLimit = 1_024 * 1_024;
+/**
+ * Bytes of one edit. A page's edits are held to a frame of 1 MiB before they come here; a deck of 1,000 parts, brought over
+ * HTTP as one edit, is about that size and may be larger with its facts.
+ */
+export const updateBytesLimit = 4 * 1_024 * 1_024;

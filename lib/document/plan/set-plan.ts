@@ -28,7 +28,7 @@ export function setPlan(sheet: Sheet, points: readonly PlannedPoint[], newId: ()
     const name = typed.trim();
     if (holdPoints.some((point) => point.name === name)) return no('name', `Two hold points are called ${name}. Each needs a name of its own.`);
     const last = holdPoints.at(-1);
-    if (last && volts < last.volts) return no('volts', `${name} is below ${last.name}. Hold points ascend by volts.`);
+    if (last && volts <= last.volts) return no('volts', `${name} is not above ${last.name}. Hold points ascend by volts.`);
     const part = source === undefined ? undefined : sheet.parts.find((one) => one.ref === source);
     if (source !== undefined && !part) return no('source', `The sheet has no part ${source}.`);
     if (scenario !== undefined && !scenarios.some((one) => one.name === scenario)) {
