@@ -1,7 +1,7 @@
 import type { IncomingMessage, ServerResponse } from 'node:http';
 
 /** Longest body of an internal call: the largest update as base64, and its envelope. */
-const bodyBytes = 2 * 1024 * 1024;
+const bodyBytes = 6 * 1024 * 1024;
 
 /** Reads a JSON body; undefined when it is too long or no JSON. */
 export async function readJson(request: IncomingMessage): Promise<unknown> {
