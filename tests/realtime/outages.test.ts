@@ -85,10 +85,14 @@ describe('a database that answers but takes no rows', () => {
     const page = await open(circuitId, maker);
     let release = (): void => {};
     const held = new Promise<void>((resolve) => { release = resolve; });
+    let taken = (): void => {};
+    const locked = new Promise<void>((resolve) => { taken = resolve; });
     const lock = world.db.transaction(async (tx) => {
       await tx.execute(sql`select * from rt_room where room_id = ${circuitId} for update`);
+      taken();
       await held;
     });
+    await locked;
     page.addResistor('R1');
     await page.until('not saved to be said', ({ save }) => save.state === 'not saved', 4_000);
     page.addResistor('R2');
