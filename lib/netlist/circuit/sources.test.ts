@@ -47,3 +47,10 @@ test('parts of one stage: way, pull-down, load, clamp', () => {
   expect(one?.clamps.map(({ ref }) => ref)).toEqual(['DZ']);
   expect(one?.load.map(({ part }) => part.ref)).toEqual(['RL']);
 });
+
+test('a fast wave is a switching frequency, a slow one is not', () => {
+  const fsw = (wave: string) => circuit(`VDD vdd 0 12\n*@VDD role=supply\nVG in 0 ${wave}\n${stage}`).sources.controls[0]?.fsw;
+  expect(fsw('PULSE(0 10 0 10n 10n 20u 40u)')).toBeCloseTo(25_000, 6);
+  expect(fsw('PULSE(0 10 0 1u 1u 1 2)')).toBeUndefined();
+  expect(fsw('10')).toBeUndefined();
+});

@@ -53,6 +53,16 @@ function feedsLoad(graph: Graph, rails: ReadonlySet<string>, gates: ReadonlySet<
   });
 }
 
+/** Below this a wave counts as switching by hand: currents settle within its period. Common practice, no source. */
+const fastFrom = 1_000;
+
+/** Frequency of a wave that drives faster than currents settle; undefined for slower ones and for single shots. */
+function waveFrequency({ wave }: NetlistPart): number | undefined {
+  const period = wave?.shape === 'pulse' ? wave.args[6] : undefined;
+  const hertz = wave?.shape === 'sin' ? wave.args[2] : period ? 1 / period : undefined;
+  return hertz !== undefined && hertz >= fastFrom ? hertz : undefined;
+}
+
 function controlOf(part: NetlistPart): Control {
   const role = roleOf(part);
   const [out, back] = endNets(part) ?? ['', ''];
@@ -61,7 +71,7 @@ function controlOf(part: NetlistPart): Control {
     part, out, back, high: levels.high, low: levels.low, levelsFrom: levels.source,
     nature: role === 'pin' ? 'pin' : role === 'generator' ? 'generator' : 'source',
     openDrain: labelOf(part, 'kind') === 'open-drain-gpio',
-    fsw: quantityOf(part, 'fsw'),
+    fsw: quantityOf(part, 'fsw') ?? waveFrequency(part),
   };
 }
 

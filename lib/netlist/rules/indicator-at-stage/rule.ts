@@ -138,7 +138,7 @@ function failOutcome(points: PointSet, group: Group, base: Pick<Outcome, 'severi
   const names = listWords(concerned.map((part) => part.ref));
   const evidence: readonly Evidence[] = [
     ...first.map(({ stress, verdict }) => stressEvidence(stress.part.ref, stress.quantity, stress.unit, verdict)),
-    ...said.flatMap(({ stress }) => crossingEvidence(stress.part.ref, stress.crossing())),
+    ...said.flatMap(({ stress }) => crossingEvidence(stress.part.ref, stress.crossing())).sort((a, b) => Number(a.value) - Number(b.value)),
     ...(byStation[failing - 1] ?? []).map(({ stress, verdict }) => ({ entity: stress.part.ref, quantity: `${stress.quantity} within limits`, value: verdict.value, unit: stress.unit, source: `operating point ${placeWords(verdict.point)}` })),
     ...(failing === top ? [] : over.map(({ stress, verdict }) => ({ entity: stress.part.ref, quantity: `${stress.quantity} at the top of the plan`, value: verdict.value, unit: stress.unit, source: `operating point ${placeWords(verdict.point)}` }))),
   ];
