@@ -94,7 +94,7 @@ export class ReadingGeometry implements SheetGeometry {
   }
 
   texts(): readonly ScreenBox[] {
-    this.labels ??= placeLabels(this.sheet).map((label) => label.box);
+    this.labels ??= [...placeLabels(this.sheet).map((label) => label.box), ...this.sheet.parts.filter((part) => part.kind === 'net-name').map(netNameBox)];
     return this.labels.map((box) => {
       const a = this.screen({ x: box.left, y: box.top });
       const b = this.screen({ x: box.right, y: box.bottom });

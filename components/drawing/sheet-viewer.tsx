@@ -1,5 +1,5 @@
 'use client';
-import { useEffect, useId, useMemo, useState } from 'react';
+import { useEffect, useId, useMemo } from 'react';
 import type { SheetGeometry } from '@/components/margin/sheet-geometry';
 import type { Sheet } from '@/lib/document/records';
 import { drawingBounds } from './drawing-bounds';
@@ -28,16 +28,13 @@ export function SheetViewer({ sheet, label, volts, lit, shown, titleBlock, onGeo
   const { ref, view, width, height, zoom, fit, centre, drag } = useView(bounds);
   const pattern = useId();
   const inset = 24;
-  const [geometry, setGeometry] = useState<ReadingGeometry | null>(null);
+  const geometry = useMemo(() => new ReadingGeometry(sheet, bounds, { x: 0, y: 0, scale: 1 }, { width: 0, height: 0 }, centre), [sheet, bounds, centre]);
   useEffect(() => {
-    const made = new ReadingGeometry(sheet, bounds, { x: 0, y: 0, scale: 1 }, { width: 0, height: 0 }, centre);
-    setGeometry(made);
-    onGeometry(made);
+    onGeometry(geometry);
     return () => onGeometry(null);
-    // eslint-disable-next-line react-hooks/exhaustive-deps -- `centre` only sets state; a new drawing makes a new geometry.
-  }, [sheet, bounds, onGeometry]);
+  }, [geometry, onGeometry]);
   useEffect(() => {
-    geometry?.moved({ scale: view.scale, x: view.x - inset / view.scale, y: view.y - inset / view.scale }, { width: width + inset + 10, height: height + inset + 46 });
+    geometry.moved({ scale: view.scale, x: view.x - inset / view.scale, y: view.y - inset / view.scale }, { width: width + inset + 10, height: height + inset + 46 });
   }, [geometry, view.x, view.y, view.scale, width, height]);
   const step = 50 * view.scale;
   const zone = 'absolute font-cond text-legend font-medium text-ink-2';

@@ -73,16 +73,21 @@ export function useView(bounds: Box): ViewControl {
     return () => { observer.disconnect(); element.removeEventListener('wheel', wheel); };
   }, []);
 
+  const centre = useCallback((point: Point) => {
+    const room = ref.current?.getBoundingClientRect();
+    if (!room) return;
+    setOwn((before) => {
+      const now = before ?? current.current;
+      return { ...now, x: point.x - room.width / now.scale / 2, y: point.y - room.height / now.scale / 2 };
+    });
+  }, []);
   const middle = useCallback(() => ({ x: size.width / 2, y: size.height / 2 }), [size]);
   const end = (event: PointerEvent) => pointers.current.delete(event.pointerId);
   return {
     ref, view, ...size,
     zoom: (factor) => setOwn(zoomed(current.current, factor, middle())),
     fit: () => setOwn(fitView(bounds, size.width, size.height)),
-    centre: (point) => setOwn((before) => {
-      const now = before ?? current.current;
-      return { ...now, x: point.x - size.width / now.scale / 2, y: point.y - size.height / now.scale / 2 };
-    }),
+    centre,
     drag: {
       onPointerDown: (event) => { pointers.current.set(event.pointerId, { x: event.clientX, y: event.clientY }); event.currentTarget.setPointerCapture(event.pointerId); },
       onPointerMove: (event) => {

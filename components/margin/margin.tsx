@@ -48,8 +48,7 @@ export function Margin({ entries, geometry, plan, shownVolts, checked, selected,
   const wide = useMedia(wideQuery, true);
   const phone = useMedia(phoneQuery, false);
   const [filter, setFilter] = useState<MarginFilter>('all');
-  const [heights, refOf] = useHeights();
-  const [fullHeights, setFullHeights] = useState<ReadonlyMap<string, number>>(new Map());
+  const { now: heights, full: fullHeights, refOf, forget } = useHeights();
   const [scroll, setScroll] = useState(0);
   const column = useRef<HTMLDivElement>(null);
 
@@ -63,20 +62,12 @@ export function Margin({ entries, geometry, plan, shownVolts, checked, selected,
   const crowded = phone || Boolean(form) || (wide && targets.height > 0 && wanted > room);
   const foldedOf = (entry: MarginEntry) => entry.key !== selected && (crowded || entry.kind === 'undetermined');
 
-  useEffect(() => {
-    if (crowded) return;
-    setFullHeights((before) => {
-      const changed = [...heights].some(([key, height]) => before.get(key) !== height);
-      return changed ? new Map([...before, ...heights]) : before;
-    });
-  }, [crowded, heights]);
-
   // Heights measured before the fonts were there are wrong: measure again.
   useEffect(() => {
     let over = false;
-    void document.fonts.ready.then(() => { if (!over) setFullHeights(new Map()); });
+    void document.fonts.ready.then(() => { if (!over) forget(); });
     return () => { over = true; };
-  }, [shown.length]);
+  }, [shown.length, forget]);
 
   const layout = layOutColumn(
     anchored.map((entry) => {
@@ -141,6 +132,7 @@ export function Margin({ entries, geometry, plan, shownVolts, checked, selected,
                   id={entry.key}
                   ref={refOf(entry.key)}
                   style={style}
+                  data-folded={common.folded ? '' : undefined}
                   className={classNames(
                     'pl-3 text-sm leading-[1.34] max-wide:mb-1 max-tablet:mb-0 max-tablet:border-b max-tablet:border-rule max-tablet:pr-3.5 max-tablet:pl-3.5 max-tablet:text-body',
                     tied && 'absolute inset-x-0',

@@ -1,21 +1,40 @@
 'use client';
 import { useCallback, useEffect, useRef, useState } from 'react';
 
-/** Heights of keyed elements, measured together. The returned function makes a ref for one key. */
-export function useHeights(): readonly [ReadonlyMap<string, number>, (key: string) => (element: HTMLElement | null) => (() => void) | undefined] {
-  const [heights, setHeights] = useState<ReadonlyMap<string, number>>(new Map());
+interface Heights {
+  readonly now: ReadonlyMap<string, number>;
+  /** Last height of each while it was not folded. */
+  readonly full: ReadonlyMap<string, number>;
+}
+
+const none: Heights = { now: new Map(), full: new Map() };
+
+interface HeightsControl extends Heights {
+  /** Ref for the element of one key; one that is folded says so in `data-folded`. */
+  readonly refOf: (key: string) => (element: HTMLElement | null) => (() => void) | undefined;
+  /** Forgets full heights, so that they are measured again. */
+  readonly forget: () => void;
+}
+
+/** Heights of keyed elements, measured together. */
+export function useHeights(): HeightsControl {
+  const [heights, setHeights] = useState<Heights>(none);
   const observer = useRef<ResizeObserver | null>(null);
   const keys = useRef(new WeakMap<Element, string>());
 
   const observe = useCallback((element: HTMLElement, key: string) => {
     observer.current ??= new ResizeObserver((entries) => {
       setHeights((before) => {
-        const after = new Map(before);
+        const now = new Map(before.now);
+        const full = new Map(before.full);
         for (const entry of entries) {
           const of = keys.current.get(entry.target);
-          if (of !== undefined) after.set(of, Math.ceil(entry.borderBoxSize[0]?.blockSize ?? entry.contentRect.height));
+          if (of === undefined) continue;
+          const height = Math.ceil(entry.borderBoxSize[0]?.blockSize ?? entry.contentRect.height);
+          now.set(of, height);
+          if (!entry.target.hasAttribute('data-folded')) full.set(of, height);
         }
-        return after;
+        return { now, full };
       });
     });
     keys.current.set(element, key);
@@ -35,5 +54,6 @@ export function useHeights(): readonly [ReadonlyMap<string, number>, (key: strin
     refs.current.set(key, made);
     return made;
   }, [observe]);
-  return [heights, refOf];
+  const forget = useCallback(() => setHeights((before) => ({ ...before, full: new Map() })), []);
+  return { ...heights, refOf, forget };
 }

@@ -24,7 +24,7 @@ interface MomentProps {
 export function Moment({ at, form = 'short' }: MomentProps) {
   const zone = useZone();
   const date = new Date(at);
-  const day = new Intl.DateTimeFormat('en-GB', { timeZone: zone, day: 'numeric', month: 'short', ...(Math.abs(Date.now() - date.getTime()) > 300 * 86_400_000 ? { year: 'numeric' } : {}) }).format(date);
+  const day = new Intl.DateTimeFormat('en-GB', { timeZone: zone, day: 'numeric', month: 'short', ...(Math.abs(new Date().getTime() - date.getTime()) > 300 * 86_400_000 ? { year: 'numeric' } : {}) }).format(date);
   const time = new Intl.DateTimeFormat('en-GB', { timeZone: zone, hour: '2-digit', minute: '2-digit' }).format(date);
   const full = new Intl.DateTimeFormat('en-GB', { timeZone: zone, dateStyle: 'long', timeStyle: 'short' }).format(date);
   const named = `${full}, ${zone.replace('_', ' ')}`;
