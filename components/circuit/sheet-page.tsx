@@ -83,7 +83,7 @@ export function SheetPage() {
       cautions={point && point.peak > touchSafeVolts ? <CautionsLine volts={point.peak} /> : null}
       foot={<>{session && snapshot ? <RefusedEdits session={session} snapshot={snapshot} /> : null}<PhoneSwitch pane={pane} count={entries.length} onPane={setPane} /></>}
       tools={editor ? <ToolStrip editor={editor} onCommands={() => setListing(!listing)} /> : null}
-      status={<SheetStatus snapshot={snapshot} session={session} live={live} entries={entries} plan={plan} message={state?.message ?? null} readOnly={state?.readOnly ?? true} />}
+      status={<SheetStatus editor={editor} snapshot={snapshot} session={session} live={live} entries={entries} plan={plan} message={state?.message ?? null} readOnly={state?.readOnly ?? true} />}
     >
       <MarginProvider value={{ rights: { write: may('write notes'), edit: may('edit the sheet'), mentor: may('resolve a note') && !may('edit the sheet'), personId: person.id }, actions }}>
         <SheetWorkspace

@@ -4,7 +4,9 @@ import { voltsWords } from '@/components/ladder/plan-words';
 import { StatusStrip } from '@/components/shell/status-strip';
 import { Icon } from '@/components/ui/icon';
 import { Moment } from '@/components/ui/moment';
+import { HoverHint, ToolHint } from '@/components/sheet/sheet-hints';
 import type { LiveFindings } from '@/lib/check/live-checker';
+import type { Editor } from '@/lib/editor/editor';
 import type { SheetSession, SheetSnapshot } from '@/realtime/client/sheet-session';
 import { saveLamp, SaveWords } from './save-state';
 
@@ -16,6 +18,7 @@ export function CheckedWords({ live }: { readonly live: LiveFindings | null }) {
 }
 
 interface SheetStatusProps {
+  readonly editor: Editor | null;
   readonly session: SheetSession | null;
   readonly snapshot: SheetSnapshot | null;
   readonly live: LiveFindings | null;
@@ -26,7 +29,7 @@ interface SheetStatusProps {
 }
 
 /** The foot of the sheet page: how far it is blocked, what the editor says, and the save mark. */
-export function SheetStatus({ session, snapshot, live, entries, plan, message, readOnly }: SheetStatusProps) {
+export function SheetStatus({ editor, session, snapshot, live, entries, plan, message, readOnly }: SheetStatusProps) {
   const stop = entries.find((entry) => entry.kind === 'stop');
   const at = stop?.kind === 'stop' ? plan.find((point) => point.name === stop.finding.holdPoint) ?? plan[0] : undefined;
   const state = !live ? 'Checking' : stop ? at ? `Blocked at ${voltsWords(at.volts)}` : 'A stop is open' : 'Within limits';
@@ -40,12 +43,16 @@ export function SheetStatus({ session, snapshot, live, entries, plan, message, r
         readOnly && snapshot?.loaded ? <span className="inline-flex items-center gap-1.5"><Icon name="lock" className="size-3" />{snapshot.room.state === 'quarantined' ? snapshot.room.why : 'Read only for you'}</span> : null,
         message,
         others === 0 ? 'Only you are here' : `${others + 1} people on the sheet`,
+        editor ? <HoverHint editor={editor} /> : null,
       ]}
       right={
-        <span className="flex items-center gap-3" role="status">
-          {lamp === 'stop' || lamp === 'caution' ? <button type="button" onClick={() => session?.reconnect()} className="min-h-6 text-act underline underline-offset-[3px]">Try now</button> : null}
-          <SaveWords snapshot={snapshot} />
-        </span>
+        <>
+          {editor ? <span className="truncate text-silk-2"><ToolHint editor={editor} /></span> : null}
+          <span className="flex items-center gap-3" role="status">
+            {lamp === 'stop' || lamp === 'caution' ? <button type="button" onClick={() => session?.reconnect()} className="min-h-6 text-act underline underline-offset-[3px]">Try now</button> : null}
+            <SaveWords snapshot={snapshot} />
+          </span>
+        </>
       }
     />
   );

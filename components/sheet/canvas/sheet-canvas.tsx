@@ -134,6 +134,7 @@ function Canvas({ editor, state, label, volts = {}, lit = noParts, others = [], 
             <AskingBox editor={editor} onDone={back} />
           </ReactFlow>
         </CanvasProvider>
+        <p role="status" className="sr-only">{state.message}</p>
         <ZoneRulers frame={frame} width={view.width} height={view.height} />
         {shown ? <p className="silk pointer-events-none absolute top-3.5 left-4 bg-film text-act max-tablet:hidden">{shown}</p> : null}
       </div>
