@@ -45,7 +45,7 @@ export interface SheetWorkspaceProps {
 
 /** Gives the focus to the canvas, where the sheet's keys are live. */
 function toCanvas(): void {
-  document.querySelector<HTMLElement>('[role=application]')?.focus();
+  document.querySelector<HTMLElement>('.sheet-canvas')?.focus();
 }
 
 /** Drawer, canvas and margin side by side. */

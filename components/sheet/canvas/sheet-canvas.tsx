@@ -84,6 +84,9 @@ function Canvas({ editor, state, label, volts = {}, lit = noParts, others = [], 
   }, [geometry, view.width, view.height]);
   useEffect(() => { tellView(null, flow.getViewport()); }, [tellView, flow]);
 
+  // The flow calls itself an application; one is enough, and this one has the name and the keys.
+  useEffect(() => root.current?.querySelector('.react-flow')?.setAttribute('role', 'presentation'), []);
+
   const context = useMemo(() => ({ editor, labels, zigzag, lit }), [editor, labels, zigzag, lit]);
   const back = useCallback(() => root.current?.focus(), []);
   return (

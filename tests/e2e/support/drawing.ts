@@ -5,7 +5,7 @@ export class Drawing {
   constructor(readonly page: Page) {}
 
   get canvas(): Locator {
-    return this.page.getByRole('application');
+    return this.page.getByRole('application', { name: /^Schematic/ });
   }
 
   get form(): Locator {
