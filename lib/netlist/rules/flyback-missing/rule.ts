@@ -81,7 +81,10 @@ function coilOutcome(circuit: Circuit, coil: NetlistPart, all: readonly Switched
   if (!worst) return everywhere({ ...base, outcome: 'pass', message: `${coil.ref}: its current has a way on when the switch opens`, evidence: [clampEvidence(1)] });
   const energy = avalanche(circuit, worst, values);
   const transistor = worst.stage.transistor;
-  const energyEvidence: readonly Evidence[] = energy ? [{ entity: coil.ref, quantity: 'energy', value: energy.joules, unit: 'J', source: `½·L·I² at ${say(coilAmps(circuit, worst), 'A')}`, limit: energy.limit, limitSource: energy.source }] : [];
+  const energyEvidence: readonly Evidence[] = energy ? [{
+    entity: coil.ref, quantity: 'energy', value: energy.joules, unit: 'J', source: `½·L·I² at ${say(coilAmps(circuit, worst), 'A')}`,
+    limit: energy.limit, limitSource: energy.source,
+  }] : [];
   if (energy && energy.joules < energy.limit) return everywhere({ ...base, outcome: 'pass', message: `${coil.ref} holds ${say(energy.joules, 'J')}: ${transistor.ref} takes that itself`, evidence: energyEvidence });
   return everywhere({
     ...base, outcome: 'fail', refs: [coil.ref, transistor.ref], nets: [worst.ends[0]],

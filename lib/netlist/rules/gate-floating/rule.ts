@@ -65,7 +65,12 @@ function stageOutcome(circuit: Circuit, stage: Stage, values: Values): Outcome {
   const base = { severity: 'stop', target: { transistor: [transistor.id] }, refs: [transistor.ref], nets: [terminals.control] } as const;
   const verdict = verdictOf(circuit, stage);
   const paths = (value: number) => ({ entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'DC paths', value, unit: '', source: 'connections', limit: 1, limitSource: `an undriven ${control} must be held off` });
-  if (verdict === 'not examined') return everywhere({ ...base, outcome: 'undetermined', message: `Cannot decide what drives ${transistor.ref}’s ${control}: a part that is not examined is joined to it`, evidence: [], missing: 'a part not examined' });
+  if (verdict === 'not examined') {
+    return everywhere({
+      ...base, outcome: 'undetermined', evidence: [], missing: 'a part not examined',
+      message: `Cannot decide what drives ${transistor.ref}’s ${control}: a part that is not examined is joined to it`,
+    });
+  }
   if (!verdict) return everywhere({ ...base, outcome: 'pass', message: `${transistor.ref} ${control} has a DC path in every state`, evidence: [paths(1)] });
   const threshold = isFet(transistor) ? magnitudeOf(transistor, 'vth_min') ?? magnitudeOf(transistor, 'vth_typ') ?? values.assumedThreshold : 0.4;
   return everywhere({

@@ -95,6 +95,12 @@ const overWords = ({ stress }: Judged): string => {
   return `${stress.part.ref} over its ${say(stress.rated, stress.unit)}${from === undefined ? '' : ` from ${say(from, 'V')}`}`;
 };
 
+/** A stress at another place of the plan, for comparison. */
+const reading = ({ stress, verdict }: Judged, where: string): Evidence => ({
+  entity: stress.part.ref, quantity: `${stress.quantity} ${where}`, value: verdict.value, unit: stress.unit,
+  source: `operating point ${placeWords(verdict.point)}`,
+});
+
 /** Amps and watts at a station's stated value: `269 mA in D1 and 87 W from R1`. */
 function readings(points: PointSet, station: Station, stresses: readonly Stress[]): string {
   const shown = [...stresses.filter(({ quantity }) => quantity === 'current'), ...stresses.filter(({ quantity }) => quantity === 'power')];
@@ -118,7 +124,10 @@ function groupOutcome(input: RuleInput<typeof parameters>, group: Group): Outcom
   }
   const calm = byStation[0] ?? [];
   if (failing < 0) {
-    return everywhere({ ...base, outcome: 'pass', message: `${listWords(base.refs)}: within limits at every hold point`, evidence: (byStation[byStation.length - 1] ?? []).map(({ stress, verdict }) => stressEvidence(stress.part.ref, stress.quantity, stress.unit, verdict)) });
+    return everywhere({
+      ...base, outcome: 'pass', message: `${listWords(base.refs)}: within limits at every hold point`,
+      evidence: (byStation[byStation.length - 1] ?? []).map(({ stress, verdict }) => stressEvidence(stress.part.ref, stress.quantity, stress.unit, verdict)),
+    });
   }
   if (failing === 0 || calm.length === 0) {
     return everywhere({ ...base, outcome: 'not applicable', message: `${listWords(base.refs)}: no lower hold point passes`, evidence: [] });
@@ -139,8 +148,8 @@ function failOutcome(points: PointSet, group: Group, base: Pick<Outcome, 'severi
   const evidence: readonly Evidence[] = [
     ...first.map(({ stress, verdict }) => stressEvidence(stress.part.ref, stress.quantity, stress.unit, verdict)),
     ...said.flatMap(({ stress }) => crossingEvidence(stress.part.ref, stress.crossing())).sort((a, b) => Number(a.value) - Number(b.value)),
-    ...(byStation[failing - 1] ?? []).map(({ stress, verdict }) => ({ entity: stress.part.ref, quantity: `${stress.quantity} within limits`, value: verdict.value, unit: stress.unit, source: `operating point ${placeWords(verdict.point)}` })),
-    ...(failing === top ? [] : over.map(({ stress, verdict }) => ({ entity: stress.part.ref, quantity: `${stress.quantity} at the top of the plan`, value: verdict.value, unit: stress.unit, source: `operating point ${placeWords(verdict.point)}` }))),
+    ...(byStation[failing - 1] ?? []).map((judged) => reading(judged, 'within limits')),
+    ...(failing === top ? [] : over.map((judged) => reading(judged, 'at the top of the plan'))),
   ];
   const quoted = (byStation[top] ?? []).map(({ stress }) => stress).filter(({ part }) => concerned.includes(part));
   const topWords = stationWords(points.stations[top]!);

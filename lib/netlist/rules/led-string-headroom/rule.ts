@@ -42,7 +42,12 @@ function branchOutcomes(input: Input, branch: LedBranch): readonly Outcome[] {
     const severity: Severity | null = forward >= cautionShare * volts ? 'caution' : forward > adviceShare * volts ? 'advice' : null;
     const share = severity === 'caution' ? cautionShare : adviceShare;
     const evidence = [
-      { entity: names, quantity: 'forward voltage', value: severity === 'caution' && forward === share * volts ? forward * (1 + 1e-12) : forward, unit: 'V', source: `V_F of ${names}, ${originOf(branch.leds[0]!, 'vf')}`, limit: share * volts, limitSource: `${share * 100} % of the ${say(volts, 'V')} across the path` },
+      {
+        // At exactly all of the volts it fails: nothing is left for the resistor.
+        entity: names, quantity: 'forward voltage', value: severity === 'caution' ? Math.max(forward, share * volts * (1 + 1e-12)) : forward, unit: 'V',
+        source: `V_F of ${names}, ${originOf(branch.leds[0]!, 'vf')}`,
+        limit: share * volts, limitSource: `${share * 100} % of the ${say(volts, 'V')} across the path`,
+      },
       { entity: names, quantity: 'voltage', value: volts, unit: 'V', source: pointWords(point) },
     ];
     if (!severity) return atPoint(point, { ...base, outcome: 'pass', message: `${names}: ${say(volts - forward, 'V')} are left for the resistor ${placeWords(point)}`, evidence });

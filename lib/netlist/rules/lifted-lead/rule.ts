@@ -81,7 +81,10 @@ function withstands(stage: Stage, ohms: number, volts: number): readonly Evidenc
 function resistiveOutcome(circuit: Circuit, stage: Stage, { lead, ohms }: Lifted, values: Values): Outcome {
   const { transistor, terminals } = stage;
   const { control, reference } = terminalWords(stage);
-  const base = { severity: 'stop' as Severity, target: { transistor: [transistor.id] }, refs: [...stage.pullDowns.slice(0, 1).map(({ part }) => part.ref), transistor.ref, lead.name], nets: [terminals.control], state: `lifted ${lead.name}` as const };
+  const base = {
+    severity: 'stop' as Severity, target: { transistor: [transistor.id] }, nets: [terminals.control], state: `lifted ${lead.name}` as const,
+    refs: [...stage.pullDowns.slice(0, 1).map(({ part }) => part.ref), transistor.ref, lead.name],
+  };
   const off = offVolts(stage, values);
   const leakage = leakageOf(stage);
   const volts = leakage.amps * ohms;
@@ -92,7 +95,12 @@ function resistiveOutcome(circuit: Circuit, stage: Stage, { lead, ohms }: Lifted
   if (!off.certain && severity !== 'stop') return missingFact(transistor, 'vth_min', 'V_GS(th) minimum', base);
   const limit = severity === 'stop' ? stopAt : cautionAt;
   const evidence: readonly Evidence[] = [
-    { entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'leakage voltage', value: severity === 'caution' ? Math.max(volts, cautionAt * (1 + 1e-9)) : volts, unit: 'V', source: `${say(leakage.amps, 'A')} ${leakage.assumed ? '(assumed)' : ''} × ${say(ohms, 'Ω')} with ${lead.name} lifted`, limit, limitSource: `${say(limit, 'V')}: from ${off.fact}` },
+    {
+      // A caution starts at its limit, not above it.
+      entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'leakage voltage', value: severity === 'caution' ? Math.max(volts, cautionAt * (1 + 1e-9)) : volts, unit: 'V',
+      source: `${say(leakage.amps, 'A')}${leakage.assumed ? ' (assumed)' : ''} × ${say(ohms, 'Ω')} with ${lead.name} lifted`,
+      limit, limitSource: `${say(limit, 'V')}: from ${off.fact}`,
+    },
     { entity: transistor.ref, quantity: isFet(transistor) ? 'igss' : 'icbo', value: leakage.amps, unit: 'A', source: leakage.assumed ? 'assumed' : 'typed' },
     { entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'resistance', value: ohms, unit: 'Ω', source: `connections with ${lead.name} lifted` },
     ...withstands(stage, ohms, off.volts),

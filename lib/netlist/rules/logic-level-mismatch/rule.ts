@@ -92,10 +92,20 @@ function stageOutcomes(input: Input, stage: Stage): readonly Outcome[] {
     if (!on) return atStation(station, { ...base, outcome: 'undetermined', message: `${transistor.ref}: no gate voltage computed`, evidence: [], missing: 'operating point' });
     if (on.volts < input.parameters.drivenVolts) {
       if (!stage.control) return everywhere({ ...base, outcome: 'not applicable', holdPoint: station.holdPoint, message: `${transistor.ref} is never driven on`, evidence: [] });
-      return atPoint(on.point, { ...base, outcome: 'undetermined', missing: `${stage.control.part.ref} high`, evidence: [], message: `Cannot decide without ${stage.control.part.ref}’s high level (high): nothing drawn turns ${transistor.ref} on` });
+      const { ref } = stage.control.part;
+      return atPoint(on.point, {
+        ...base, outcome: 'undetermined', missing: `${ref} high`, evidence: [],
+        message: `Cannot decide without ${ref}’s high level (high): nothing drawn turns ${transistor.ref} on`,
+      });
     }
     const decision = decide(input, stage, on);
-    if (decision.missing) return atPoint(on.point, { ...base, outcome: 'undetermined', missing: `${transistor.ref} ${decision.missing}`, evidence: [], message: `Cannot decide without ${transistor.ref}’s ${decision.missing === 'vth_max' ? 'V_GS(th) maximum' : 'V_GS for R_DS(on)'} (${decision.missing}): its gate gets ${say(on.volts, 'V')}` });
+    if (decision.missing) {
+      const words = decision.missing === 'vth_max' ? 'V_GS(th) maximum' : 'V_GS for R_DS(on)';
+      return atPoint(on.point, {
+        ...base, outcome: 'undetermined', missing: `${transistor.ref} ${decision.missing}`, evidence: [],
+        message: `Cannot decide without ${transistor.ref}’s ${words} (${decision.missing}): its gate gets ${say(on.volts, 'V')}`,
+      });
+    }
     if (!decision.severity) return atPoint(on.point, { ...base, outcome: 'pass', message: `${transistor.ref} gets ${say(on.volts, 'V')} at its gate ${placeWords(on.point)}`, evidence: decision.evidence });
     const limit = decision.evidence[0]!;
     const starved = limit.quantity === 'current';

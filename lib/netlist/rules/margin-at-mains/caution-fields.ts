@@ -45,7 +45,10 @@ export function cautionFields(circuit: Circuit, stations: readonly Station[]): r
     const over = !isSourceTouchSafe(volts, isAlternating(power));
     const evidence = [
       { entity: power.ref, quantity: 'voltage', value: volts, unit: isAlternating(power) ? 'V rms' : 'V', source: 'plan' },
-      ...(over ? [{ entity: power.ref, quantity: 'fields filled', value: fields.length - empty.length, unit: '', source: 'facts of the source and parts of the sheet', limit: fields.length, limitSource: 'cautions above 60 V DC or 42.4 V peak, IEC 62368-1 ES1' }] : []),
+      ...(over ? [{
+        entity: power.ref, quantity: 'fields filled', value: fields.length - empty.length, unit: '', source: 'facts of the source and parts of the sheet',
+        limit: fields.length, limitSource: 'cautions above 60 V DC or 42.4 V peak, IEC 62368-1 ES1',
+      }] : []),
     ];
     if (!over || empty.length === 0) return [atStation(station, { ...base, outcome: 'pass', message: `${power.ref} ${over ? 'says how people are kept from it' : 'is touch-safe here'}`, evidence })];
     return [atStation(station, {

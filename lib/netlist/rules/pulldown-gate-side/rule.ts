@@ -47,7 +47,10 @@ function pullDownOutcome({ netlist }: Circuit, stage: Stage, pullDown: PullDown,
   const limit = loss > values.cautionShare ? values.cautionShare : values.adviceShare;
   const evidence = [
     { entity: pullDown.part.ref, quantity: 'share of the drive lost', value: loss, unit: '', source: `${say(series, 'Ω')} against ${say(pullDown.ohms, 'Ω')}`, limit, limitSource: 'common practice, no source' },
-    ...(starves && spec !== undefined ? [{ entity: `${transistor.ref}:G`, quantity: 'gate drive', value: full, unit: 'V', source: `${control.levelsFrom}, divided`, limit: spec, limitSource: `V_GS at which R_DS(on) is stated, ${originOf(transistor, 'rds_on_spec_vgs')}` }] : []),
+    ...(starves && spec !== undefined ? [{
+      entity: `${transistor.ref}:G`, quantity: 'gate drive', value: full, unit: 'V', source: `${control.levelsFrom}, divided`,
+      limit: spec, limitSource: `V_GS at which R_DS(on) is stated, ${originOf(transistor, 'rds_on_spec_vgs')}`,
+    }] : []),
   ];
   if (!severity) return everywhere({ ...base, outcome: 'pass', message: `${pullDown.part.ref} costs ${say(loss * 100, '%')} of the drive`, evidence });
   const net = driverSide(stage, pullDown.net);

@@ -25,7 +25,11 @@ function pullDownOutcome(stage: Stage, pullDown: PullDown, values: Values): Outc
   const base = { severity: 'caution', target: { pulldown: [pullDown.part.id], transistor: [transistor.id] }, refs: [pullDown.part.ref, transistor.ref, control.part.ref], nets: [pullDown.net] } as const;
   const evidence = [
     { entity: pullDown.part.ref, quantity: 'share of the drive lost', value: loss, unit: '', source: `${say(series, 'Ω')} against ${say(pullDown.ohms, 'Ω')}`, limit: values.driveShare, limitSource: 'common practice, no source' },
-    ...(limit ? [{ entity: control.part.ref, quantity: 'current', value: amps, unit: 'A', source: `${control.levelsFrom} over ${say(series + pullDown.ohms, 'Ω')}`, limit: limit.value * values.driverShare, limitSource: `${values.driverShare * 100} % of the ${limit.source}` }] : []),
+    ...(limit ? [{
+      entity: control.part.ref, quantity: 'current', value: amps, unit: 'A',
+      source: `${control.levelsFrom} over ${say(series + pullDown.ohms, 'Ω')}`,
+      limit: limit.value * values.driverShare, limitSource: `${values.driverShare * 100} % of the ${limit.source}`,
+    }] : []),
   ];
   const starves = loss > values.driveShare;
   const drains = limit !== undefined && amps > limit.value * values.driverShare;

@@ -55,11 +55,12 @@ export function gateOutcomes({ points, parameters: { cautionShare } }: RuleInput
     ], { heat: false });
     if (!verdict) return atStation(station, { ...base, outcome: 'undetermined', message: `${transistor.ref}: no gate voltage computed: ${refusalWords(points, station)}`, evidence: [], missing: refusalWords(points, station) });
     const evidence = [stressEvidence(`${transistor.ref}:G`, 'V_GS', 'V', verdict), ...crossingEvidence(transistor.ref, verdict.severity ? crossingVolts(points, measure, verdict.limit.limit, { heat: false }) : undefined)];
-    if (!verdict.severity) return atPoint(verdict.point, { ...base, outcome: 'pass', message: `${transistor.ref} gate stands at most ${say(verdict.value, 'V')} from its source ${placeWords(verdict.point)} of ${say(rating.value, 'V')}`, evidence });
+    const stands = `${say(verdict.value, 'V')} from its source ${placeWords(verdict.point)}`;
+    if (!verdict.severity) return atPoint(verdict.point, { ...base, outcome: 'pass', message: `${transistor.ref} gate stands at most ${stands} of ${say(rating.value, 'V')}`, evidence });
     const share = verdict.value / rating.value;
     return atPoint(verdict.point, {
       ...base, outcome: 'fail', severity: verdict.severity, evidence, remedy: remedyOf(stage, verdict.point, rating.value, cautionShare),
-      message: `${transistor.ref} gate stands ${say(verdict.value, 'V')} from its source ${placeWords(verdict.point)}: ${share > 1 ? `the oxide is rated ${say(rating.value, 'V')}` : `${say(share * 100, '%')} of its ${say(rating.value, 'V')}`}`,
+      message: `${transistor.ref} gate stands ${stands}: ${share > 1 ? `the oxide is rated ${say(rating.value, 'V')}` : `${say(share * 100, '%')} of its ${say(rating.value, 'V')}`}`,
     });
   });
 }
