@@ -1,5 +1,5 @@
 import type { CheckResult } from '@/lib/check/check-netlist';
-import { voltsByHoldPoint } from '@/lib/check/live-checker';
+import { voltsByHoldPoint } from '@/lib/check/net-volts';
 import type { Finding } from '@/lib/netlist/findings/finding';
 
 /** What the landing page's picture needs of a check: what failed, and the volts of each net at the hold point shown. */

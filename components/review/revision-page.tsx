@@ -8,7 +8,6 @@ import { PhoneSwitch, type PhonePane } from '@/components/circuit/phone-switch';
 import { ReadingRow } from '@/components/circuit/reading-row';
 import { signedTo } from '@/components/circuit/signed-state';
 import { useCircuit, useRevisionFindings, useRevisions, useThreads } from '@/components/circuit/use-circuit';
-import { useLiveFindings } from '@/components/circuit/use-live-findings';
 import { useShownAt } from '@/components/circuit/use-shown-at';
 import { SheetViewer } from '@/components/drawing/sheet-viewer';
 import { touchSafeVolts } from '@/components/ladder/ladder-point';
@@ -45,7 +44,6 @@ export function RevisionPage({ letter, tab = 'revisions' }: { readonly letter: s
   const [geometry, setGeometry] = useState<SheetGeometry | null>(null);
   const [selected, select] = useSelectedEntry();
   const [pane, setPane] = useState<PhonePane>('drawing');
-  const live = useLiveFindings(person ? sheet.data ?? null : null, circuit.data?.title ?? '');
   const entries = useMemo(() => marginEntries(findings.data ?? [], threads.data ?? []), [findings.data, threads.data]);
   const lit = useCallback((anchor: MarginAnchor) => entries.some((entry) => entry.key === selected && entry.anchor === anchor), [entries, selected]);
   const jump = useCallback((anchor: MarginAnchor) => { setPane('drawing'); geometry?.reveal(anchor); }, [geometry]);
@@ -83,7 +81,7 @@ export function RevisionPage({ letter, tab = 'revisions' }: { readonly letter: s
                 sheet={sheet.data}
                 label={`Schematic, revision ${letter}`}
                 lit={litParts}
-                volts={live?.volts[shown ?? ''] ?? {}}
+                volts={sheet.data.volts[shown ?? ''] ?? {}}
                 shown={point ? `Shown at ${voltsWords(point.volts)}` : undefined}
                 onGeometry={setGeometry}
                 titleBlock={[

@@ -2,6 +2,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { z } from 'zod';
 import { callApi } from '@/components/query/api';
+import type { NetVolts } from '@/lib/check/net-volts';
 import { holdPointRecordSchema, junctionRecordSchema, partRecordSchema, scenarioRecordSchema, wireRecordSchema, type Sheet } from '@/lib/document/records';
 
 /** A stored drawing. Models and subcircuits are kept for the engine and not read here. */
@@ -12,7 +13,11 @@ const sheetSchema = z.object({
   junctions: z.array(junctionRecordSchema),
   scenarios: z.array(scenarioRecordSchema),
   holdPoints: z.array(holdPointRecordSchema),
+  volts: z.record(z.string(), z.record(z.string(), z.number())),
 });
+
+/** The drawing of a cut and the volts of its nets by hold point. */
+export type RevisionDrawing = Sheet & { readonly volts: NetVolts };
 
 /** The drawing of a cut. It never changes. */
 export function useRevisionSheet(revision: string | undefined) {
@@ -20,6 +25,6 @@ export function useRevisionSheet(revision: string | undefined) {
     queryKey: ['revision', revision ?? '', 'sheet'],
     enabled: revision !== undefined,
     staleTime: Infinity,
-    queryFn: async ({ signal }): Promise<Sheet> => ({ ...await callApi(`/api/revisions/${revision}/sheet`, { answer: sheetSchema, signal }), models: [], subcircuits: [] }),
+    queryFn: async ({ signal }): Promise<RevisionDrawing> => ({ ...await callApi(`/api/revisions/${revision}/sheet`, { answer: sheetSchema, signal }), models: [], subcircuits: [] }),
   });
 }

@@ -40,7 +40,7 @@ export async function revisionNetlist(db: Executor, revision: RevisionId) {
 }
 
 export async function revisionSheet(db: Executor, revision: RevisionId) {
-  const [row] = await db.select({ sheet: revisions.sheet, seq: revisions.seq }).from(revisions).where(eq(revisions.id, revision));
+  const [row] = await db.select({ sheet: revisions.sheet, volts: revisions.volts, seq: revisions.seq }).from(revisions).where(eq(revisions.id, revision));
   return row;
 }
 

@@ -28,6 +28,8 @@ export const revisions = mysqlTable('revisions', {
   cutAt: moment('cut_at').notNull(),
   /** Rule versions and parameters in force at the cut. */
   rules: jsonColumn('rules', z.record(z.string(), z.object({ version: z.number(), parameters: z.record(z.string(), z.number()) }))).notNull(),
+  /** Highest volts of each net by hold point, as the checks of the cut found them; null for cuts made before they were kept. */
+  volts: jsonColumn('volts', z.record(z.string(), z.record(z.string(), z.number()))),
   askedAt: moment('asked_at'),
   askedBy: ulidColumn('asked_by').references(() => people.id),
 }, (table) => [

@@ -1,17 +1,16 @@
 import type { PointEngine } from '@/lib/netlist/engine-deck/engine-port';
 import type { Finding } from '@/lib/netlist/findings/finding';
 import type { Netlist } from '@/lib/netlist/netlist';
-import type { PointSet } from '@/lib/netlist/points/point-set';
 import { ruleRegistry } from '@/lib/netlist/rules/registry';
 import { PointCache } from './caching-engine';
 import { checkNetlist, type CheckResult } from './check-netlist';
 import { checkTopology } from './check-topology';
+import { voltsByHoldPoint, type NetVolts } from './net-volts';
 
 export interface LiveFindings {
   /** Of all outcomes; one for each fingerprint. */
   readonly findings: readonly Finding[];
-  /** Highest volts of each net against 0 V, either way, by hold point; '' without a plan. */
-  readonly volts: Readonly<Record<string, Readonly<Record<string, number>>>>;
+  readonly volts: NetVolts;
   /** `topology`: the engine has not answered for this sheet yet; `failed`: it could not. */
   readonly state: 'topology' | 'complete' | 'failed';
   /** Milliseconds since 1970. */
@@ -19,19 +18,6 @@ export interface LiveFindings {
 }
 
 const byTopology: ReadonlySet<string> = new Set(ruleRegistry.filter((rule) => rule.needs === 'topology').map((rule) => rule.id));
-
-/** Highest volts that each net reaches at each hold point, over all states of the drive at the stated value. */
-export function voltsByHoldPoint(points: PointSet): LiveFindings['volts'] {
-  const volts: Record<string, Record<string, number>> = {};
-  for (const { key, op, stated } of points.ok) {
-    if (!stated) continue;
-    const here = (volts[key.holdPoint ?? ''] ??= {});
-    for (const [net, value] of Object.entries(op.volts)) {
-      if (Math.abs(value) > Math.abs(here[net] ?? 0)) here[net] = value;
-    }
-  }
-  return volts;
-}
 
 /**
  * Checks a sheet as it changes: what topology decides at once, the rest when the engine answers. Only one full check runs;
@@ -42,7 +28,7 @@ export class LiveChecker {
   private running = false;
   private next: Netlist | null = null;
   private newest = '';
-  private last: { readonly findings: readonly Finding[]; readonly volts: LiveFindings['volts'] } = { findings: [], volts: {} };
+  private last: { readonly findings: readonly Finding[]; readonly volts: NetVolts } = { findings: [], volts: {} };
 
   constructor(
     private readonly engine: PointEngine,

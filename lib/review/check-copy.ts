@@ -1,3 +1,4 @@
+import type { NetVolts } from '@/lib/check/net-volts';
 import type { Finding } from '@/lib/netlist/findings/finding';
 import type { Netlist } from '@/lib/netlist/netlist';
 import { checkOnServer } from './check-on-server';
@@ -8,6 +9,7 @@ export interface CheckedCopy {
   readonly findings: readonly Finding[];
   /** Version and parameters of every rule that ran. */
   readonly rules: Readonly<Record<string, { version: number; parameters: Record<string, number> }>>;
+  readonly volts: NetVolts;
   /** Whether the plan says which source a hold point raises. */
   readonly sourceKnown: (holdPoint: string) => boolean;
 }

@@ -1,5 +1,6 @@
 import { PointCache } from '@/lib/check/caching-engine';
 import { checkNetlist } from '@/lib/check/check-netlist';
+import { voltsByHoldPoint } from '@/lib/check/net-volts';
 import { Problem } from '@/lib/errors/problem';
 import { ruleRegistry } from '@/lib/netlist/rules/registry';
 import type { Netlist } from '@/lib/netlist/netlist';
@@ -31,6 +32,7 @@ export async function checkOnServer(netlist: Netlist, scope: PlanScope = {}): Pr
   const sources = new Map(points.stations.map(({ holdPoint, power }) => [holdPoint, power !== null]));
   return {
     findings,
+    volts: voltsByHoldPoint(points),
     rules: Object.fromEntries(ruleRegistry.map(({ id, version, parameters }) => [
       id, { version, parameters: Object.fromEntries(Object.entries(parameters).map(([name, { value }]) => [name, value])) },
     ])),

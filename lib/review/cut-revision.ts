@@ -62,7 +62,7 @@ async function store(
   const hash = contentHash(netlist);
   await insertRevision(tx, {
     id, circuitId: access.circuit, number, letter, seq: live.seq, contentHash: hash, presentationHash: presentationHash(live.sheet),
-    netlist, sheet: live.bytes, note: input.note, cutBy: act.person.id, cutAt: act.now, rules: checked.rules,
+    netlist, sheet: live.bytes, note: input.note, cutBy: act.person.id, cutAt: act.now, rules: checked.rules, volts: checked.volts,
   });
   await insertNetlistRows(tx, id, netlist);
   await insertHoldPoints(tx, id, netlist.holdPoints, checked.sourceKnown);

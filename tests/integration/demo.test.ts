@@ -6,7 +6,8 @@ import { mintPerson } from '@/lib/access/mint';
 import type { Sheet } from '@/lib/document/records';
 import { getCircuit, getFindings, listCircuits } from '@/lib/http/operations/circuits';
 import { whoAmI } from '@/lib/http/operations/people';
-import { askCall, cutCall, getRevision, listRevisions, signOffCall } from '@/lib/http/operations/review';
+import { askCall, cutCall, getRevision, getRevisionSheet, listRevisions, signOffCall } from '@/lib/http/operations/review';
+import type { NetVolts } from '@/lib/check/net-volts';
 import type { Finding } from '@/lib/netlist/findings/finding';
 import { checkEngine } from '@/lib/review/check-engine';
 import type { Circuit } from '@/lib/schemas/circuit';
@@ -70,6 +71,13 @@ describe('the demo bench', () => {
     expect(items[1]?.waitingFor).toEqual([]);
     expect(items[2]?.waitingFor.map(({ name }) => name).sort()).toEqual(['Marek Solano', 'Ruth Adeyemi']);
     expect(items[3]?.waitingFor).toMatchObject([{ name: 'Lena Brandt', why: 'changes are asked for' }]);
+  });
+
+  it('keeps with a cut what voltages its nets reach, so that a reader sees the hazard without an engine', async () => {
+    const [newest] = (await world.call<{ items: Revision[] }>(as('lena'), listRevisions, { params: { id: heater } })).body.items;
+    const { volts } = (await world.call<{ volts: NetVolts }>(as('lena'), getRevisionSheet, { params: { id: newest?.id ?? '' } })).body;
+    expect(volts['325 V']?.['DC LINK']).toBeCloseTo(325, 0);
+    expect(volts['15 V']?.['DC LINK']).toBeCloseTo(15, 1);
   });
 
   it('stops on the lifted lead at every hold point, and on the indicator higher up only', async () => {

@@ -10,4 +10,4 @@ export function findingOf(more: Partial<Finding> = {}): Finding {
   };
 }
 
-export const checkedWith = (findings: readonly Finding[]): CheckedCopy => ({ findings, rules: { rule: { version: 1, parameters: {} } }, sourceKnown: () => true });
+export const checkedWith = (findings: readonly Finding[]): CheckedCopy => ({ findings, rules: { rule: { version: 1, parameters: {} } }, volts: {}, sourceKnown: () => true });

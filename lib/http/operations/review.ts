@@ -32,7 +32,7 @@ export const getRevisionNetlist = operation({
   target: 'revision', actions: read, answers: { 200: netlistSchema },
 });
 export const getRevisionSheet = operation({
-  id: 'getRevisionSheet', method: 'GET', path: '/api/revisions/{id}/sheet', summary: 'The drawing of the cut, as plain records', who: 'person',
+  id: 'getRevisionSheet', method: 'GET', path: '/api/revisions/{id}/sheet', summary: 'The drawing of the cut, as plain records, with the volts of its nets by hold point', who: 'person',
   target: 'revision', actions: read, answers: { 200: z.record(z.string(), z.unknown()) },
 });
 export const askCall = operation({
