@@ -11,6 +11,7 @@ export function pinStates(sheet: Sheet): ReadonlyMap<string, string> {
   if (known) return known;
   const { wiresAt } = indexOf(sheet);
   const standing = new Map<string, number>();
+  for (const junction of sheet.junctions) standing.set(pointKey(junction), 1);
   for (const part of sheet.parts) for (const pin of pinPlacesOf(part)) standing.set(pointKey(pin), (standing.get(pointKey(pin)) ?? 0) + 1);
   const states = new Map(sheet.parts.map((part) => [part.id, pinPlacesOf(part).map((pin) => {
     const wired = wiresAt.has(endKey({ at: 'pin', part: part.id, pin: pin.pin }));
