@@ -9,5 +9,5 @@ export function PhoneSwitch({ pane, count, onPane }: { readonly pane: PhonePane;
       {words}{number === undefined ? null : <span className="font-mono text-sm font-normal text-silk-2">{number}</span>}
     </button>
   );
-  return <div role="group" aria-label="Show" className="flex h-[62px] flex-none items-center gap-2 border-t border-edge bg-panel px-3 tablet:hidden print:hidden">{key('drawing', 'Drawing')}{key('margin', 'Margin', count)}</div>;
+  return <nav aria-label="Drawing or margin" className="flex h-[62px] flex-none items-center gap-2 border-t border-edge bg-panel px-3 tablet:hidden print:hidden">{key('drawing', 'Drawing')}{key('margin', 'Margin', count)}</nav>;
 }

@@ -51,10 +51,10 @@ export function ProductPicture({ sheet, check }: ProductPictureProps) {
             const { head, rest } = splitMessage(entry.finding.message);
             return (
               <article key={entry.key} className="inset-x-0 pr-3 pl-3 text-sm leading-[1.34] tablet:absolute" style={{ top }}>
-                <h3 className={`-ml-3 flex h-[26px] items-center gap-[7px] border-b pr-1.5 pl-3 font-cond text-sm font-semibold tracking-[.04em] ${tones[entry.kind]}`}>
+                <h2 className={`-ml-3 flex h-[26px] items-center gap-[7px] border-b pr-1.5 pl-3 font-cond text-sm font-semibold tracking-[.04em] ${tones[entry.kind]}`}>
                   <Mark kind={entry.kind} label={entry.number} silent /><span className="flex-1 uppercase">{words[entry.kind]}</span>
                   <span className="font-mono text-xs font-normal tracking-[-.02em] text-ink-2">{fromWords(entry.finding, plan)}</span>
-                </h3>
+                </h2>
                 <p className={entry.kind === 'stop' ? 'mt-[5px] text-body leading-tight font-semibold' : 'mt-[3px]'}><Figures>{head}</Figures></p>
                 {rest ? <p className="mt-[3px] text-ink-2"><Figures>{rest}</Figures></p> : null}
                 {entry.kind === 'stop' && entry.finding.remedy ? <p className="mt-[3px] text-ink-2"><Figures>{entry.finding.remedy.words}</Figures></p> : null}

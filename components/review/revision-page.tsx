@@ -69,7 +69,7 @@ export function RevisionPage({ letter, tab = 'revisions' }: { readonly letter: s
       back={{ href: `/circuits/${circuitId}/revisions`, words: 'Back to the revisions' }}
       ladder={<ReadingRow revisions={revisions.data} revision={revision} shown={shown} onShow={show} flags={stopFlags(entries, revision.holdPoints)} act={<RevisionAct revision={revision} />} />}
       cautions={point && point.volts > touchSafeVolts ? <CautionsLine volts={point.volts} /> : null}
-      foot={<><PhoneSwitch pane={pane} count={entries.length} onPane={setPane} /><div className="flex-none border-t border-edge bg-panel p-2.5 empty:hidden has-[>:empty]:hidden tablet:hidden"><RevisionAct revision={revision} full /></div></>}
+      foot={<><PhoneSwitch pane={pane} count={entries.length} onPane={setPane} /><section aria-label="Next step" className="flex-none border-t border-edge bg-panel p-2.5 empty:hidden tablet:hidden"><RevisionAct revision={revision} full /></section></>}
       status={<StatusStrip lamp={to ? 'ok' : 'caution'} state={revisionWords(revision, now)} notes={[<>Checked at the cut, <Moment at={revision.cutAt} form="medium" /></>, person ? null : 'Read only']} right={<span>Revision {letter}, hash <span className="figure">{shortHash(revision.contentHash)}</span></span>} />}
     >
       <RevisionPanel revisions={revisions.data} revision={revision} circuitId={circuitId} />

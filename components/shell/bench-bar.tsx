@@ -22,7 +22,7 @@ export function BenchBar({ bench, person, title, back }: BenchBarProps) {
         </TopBar>
       </div>
       <div className="tablet:hidden">
-        <PhoneBar back={back} title={title ?? bench.name} under={title ? bench.name : undefined}><ThemeToggle /><AccountMenu person={person} phone /></PhoneBar>
+        <PhoneBar heading back={back} title={title ?? bench.name} under={title ? bench.name : undefined}><ThemeToggle /><AccountMenu person={person} phone /></PhoneBar>
       </div>
     </>
   );
