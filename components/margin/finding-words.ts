@@ -37,17 +37,20 @@ function factsWords(kindId: string, values: Readonly<Record<string, unknown>>): 
   }).join(', ');
 }
 
-const netWords = (net: string): string => (net === '0' ? '0 V' : net);
+/** Nets that people named, or 0 V; an unnamed net's number means nothing to a reader, and the remedy's words say where it is. */
+const namedNet = (net: string): string | null => (net === '0' ? '0 V' : /^N[0-9]+$/.test(net) ? null : net);
+
+const placeWords = (nets: readonly (string | null)[]): string => (nets.includes(null) ? '' : ` from ${nets.join(' to ')}`);
 
 /** One edit of a proposed change, in words. */
 export function editWords(edit: RemedyEdit): string {
   switch (edit.edit) {
     case 'add part': {
       const kind = (kindRegistry as Partial<Record<string, Kind>>)[edit.kind];
-      return `${kind?.title ?? edit.kind} ${factsWords(edit.kind, edit.facts)} from ${Object.values(edit.pins).map(netWords).join(' to ')}`;
+      return `${kind?.title ?? edit.kind} ${factsWords(edit.kind, edit.facts)}${placeWords(Object.values(edit.pins).map(namedNet))}`;
     }
     case 'set facts': return `${edit.part}: ${factsWords('', edit.facts)}`;
-    case 'move pin': return `${edit.part}:${edit.pin} moves to ${netWords(edit.net)}`;
+    case 'move pin': return `${edit.part}:${edit.pin} moves to ${namedNet(edit.net) ?? 'another net'}`;
     case 'swap pins': return `${edit.part} is turned round`;
     case 'rename part': return `The part is called ${edit.ref}`;
     case 'leave open': return `${edit.part}:${edit.pin} is marked as left open`;

@@ -2,8 +2,8 @@
 import { memo } from 'react';
 import { sheetToNetlist } from '@/lib/document/nets/sheet-to-netlist';
 import type { Sheet } from '@/lib/document/records';
+import { netWords } from '@/lib/netlist/connectivity/net-words';
 import { spokenItems } from '@/lib/editor/spoken/part-spoken';
-import { netWords } from '@/lib/editor/spoken/net-at';
 
 interface TwinTablesProps {
   readonly sheet: Sheet;
@@ -25,7 +25,7 @@ export const TwinTables = memo(function TwinTables({ sheet, onSelect }: TwinTabl
           {netlist.parts.map((part) => (
             <tr key={part.id}>
               <th scope="row"><button type="button" onClick={() => onSelect(part.id)}>{spoken.get(part.id) ?? part.ref}</button></th>
-              <td>{Object.entries(part.pins).map(([pin, net]) => `${pin} ${netWords(net)}`).join(', ')}</td>
+              <td>{Object.entries(part.pins).map(([pin, net]) => `${pin} ${netWords(netlist, net, part.ref)}`).join(', ')}</td>
             </tr>
           ))}
         </tbody>
@@ -33,7 +33,7 @@ export const TwinTables = memo(function TwinTables({ sheet, onSelect }: TwinTabl
       <table>
         <caption>Nets</caption>
         <thead><tr><th scope="col">Net</th><th scope="col">Pins</th></tr></thead>
-        <tbody>{netlist.nets.map((net) => <tr key={net.name}><th scope="row">{netWords(net.name)}</th><td>{net.pins.join(', ')}</td></tr>)}</tbody>
+        <tbody>{netlist.nets.map((net) => <tr key={net.name}><th scope="row">{netWords(netlist, net.name)}</th><td>{net.pins.join(', ')}</td></tr>)}</tbody>
       </table>
       {notes.length === 0 ? null : <ul aria-label="Notes on the sheet">{notes.map((note) => <li key={note.id}>{String(note.facts.text ?? '')}</li>)}</ul>}
     </section>

@@ -26,7 +26,7 @@ test('a sheet is drawn by keys and mouse, seen by another as it grows, and survi
     await sheet.place('resis', 'R1', ['.', ...steps(20, 0)]);
     await sheet.wire(['V1', '+'], ['R1', '1']);
     await sheet.wire(['V1', '-'], ['R1', '2']);
-    await expect(sheet.part('R1')).toHaveAttribute('aria-label', /from N1 to N2/);
+    await expect(sheet.part('R1')).toHaveAttribute('aria-label', /from V1:\+ to V1:-/);
     await circuit.saved();
   });
 

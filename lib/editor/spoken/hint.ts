@@ -29,7 +29,7 @@ export function hoverWords({ hover, sheet }: EditorState): string | null {
   const spoken = spokenItems(sheet);
   switch (hover.on) {
     case 'part': case 'pin': return spoken.get(hover.part) ?? null;
-    case 'wire': case 'corner': return spoken.get(hover.wire)?.replace(/^Wire, n/, 'N') ?? null;
+    case 'wire': case 'corner': return spoken.get(hover.wire)?.replace(/^Wire, ([nu])/, (_, first: string) => first.toUpperCase()) ?? null;
     default: return null;
   }
 }

@@ -6,7 +6,7 @@ it('says what a part is and what it joins', () => {
   const stage = gateStage();
   const said = (ref: string) => spokenPart(stage, stage.parts.find((part) => part.id === ref)!).replaceAll('\u2009', ' ');
   expect(said('R1')).toBe('R1, 22 kΩ, from GATE to 0 V');
-  expect(said('Q1')).toMatch(/^Q1, .*, G on GATE, D on N1, S on 0 V$/);
+  expect(said('Q1')).toMatch(/^Q1, .*, G on GATE, D on D2:A, S on 0 V$/);
   expect(said('N1')).toBe('Net name GATE');
   expect(said('Z1')).toBe('0 V');
 });

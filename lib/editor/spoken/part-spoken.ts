@@ -1,10 +1,10 @@
 import { formatFact } from '@/lib/netlist/facts/read-fact';
+import { netWords } from '@/lib/netlist/connectivity/net-words';
 import { kindOf } from '@/lib/netlist/kinds/kind-registry';
 import { sheetToNetlist } from '@/lib/document/nets/sheet-to-netlist';
 import type { PartRecord, Sheet } from '@/lib/document/records';
 import { drawnNetNames } from '../remedy/named-net';
 import { drawnNets } from '@/lib/document/nets/drawn-net';
-import { netWords } from './net-at';
 
 /** First value that a kind prints: `10 kΩ`; empty when it is not given. */
 function mainValue(part: PartRecord): string {
@@ -21,13 +21,14 @@ export function spokenPart(sheet: Sheet, part: PartRecord): string {
   if (part.kind === 'net-name') return `Net name ${words}`;
   if (part.kind === 'zero-volt') return '0 V';
   if (part.kind === 'earth') return 'Earth';
-  const pins = Object.entries(sheetToNetlist(sheet).parts.find((one) => one.id === part.id)?.pins ?? {});
+  const netlist = sheetToNetlist(sheet);
+  const pins = Object.entries(netlist.parts.find((one) => one.id === part.id)?.pins ?? {});
   const lead = [part.ref, part.kind === 'box' ? 'not examined' : mainValue(part) || kindOf(part.kind).title].filter(Boolean).join(', ');
   const open = part.leftOpen.length > 0 ? `, ${part.leftOpen.join(' and ')} left open` : '';
   const [first, second] = pins;
-  if (pins.length === 1 && first) return `${lead}, on ${netWords(first[1])}${open}`;
-  if (pins.length === 2 && first && second) return `${lead}, from ${netWords(first[1])} to ${netWords(second[1])}${open}`;
-  return `${lead}, ${pins.map(([pin, net]) => `${pin} on ${netWords(net)}`).join(', ')}${open}`;
+  if (pins.length === 1 && first) return `${lead}, on ${netWords(netlist, first[1], part.ref)}${open}`;
+  if (pins.length === 2 && first && second) return `${lead}, from ${netWords(netlist, first[1], part.ref)} to ${netWords(netlist, second[1], part.ref)}${open}`;
+  return `${lead}, ${pins.map(([pin, net]) => `${pin} on ${netWords(netlist, net, part.ref)}`).join(', ')}${open}`;
 }
 
 /** What a wire joins, as it is spoken: `Wire, net GATE: Q1:G, R3:2`. */
@@ -37,7 +38,9 @@ export function spokenWire(sheet: Sheet, wireId: string): string {
   const refs = new Map(sheet.parts.map((part) => [part.id, part.ref]));
   const pins = (drawnNets(sheet)[number]?.pins ?? []).filter((pin) => refs.get(pin.part)).map((pin) => `${refs.get(pin.part)}:${pin.pin}`);
   if (name === undefined) return 'Wire, joins no part';
-  return `Wire, net ${netWords(name)}${pins.length > 0 ? `: ${pins.slice(0, 8).join(', ')}` : ''}`;
+  const net = sheetToNetlist(sheet).nets.find((one) => one.name === name);
+  const called = name === '0' ? 'net 0 V' : net && net.givenNames.length === 0 ? 'unnamed net' : `net ${name}`;
+  return `Wire, ${called}${pins.length > 0 ? `: ${pins.slice(0, 8).join(', ')}` : ''}`;
 }
 
 const cache = new WeakMap<Sheet, ReadonlyMap<string, string>>();

@@ -1,3 +1,4 @@
+import { netWords } from '../../connectivity/net-words';
 import { isInternal, isTransistor } from '../../circuit/part-nature';
 import type { Remedy } from '../../findings/finding';
 import type { Net, Netlist, NetlistPart } from '../../netlist';
@@ -5,7 +6,6 @@ import { pinReference } from '../../connectivity/pin-reference';
 import { kindOf } from '../../kinds/kind-registry';
 import type { Outcome, Rule, RuleInput } from '../rule';
 import { everywhere } from '../support/outcome';
-import { netWords } from '../support/words';
 
 const parameters = {
   leastPins: { value: 2, unit: '', words: 'pins that a net must join', source: 'common practice, no source' },

@@ -1,3 +1,4 @@
+import { netWords } from '../../connectivity/net-words';
 import type { Circuit } from '../../circuit/circuit';
 import { acrossFrom } from '../../circuit/graph';
 import { magnitudeOf, originOf } from '../../circuit/part-facts';
@@ -7,7 +8,7 @@ import type { Severity } from '../../findings/finding';
 import type { Outcome, Rule } from '../rule';
 import { everywhere } from '../support/outcome';
 import { frontOf, frontOhms } from '../support/pull-down';
-import { netWords, say } from '../support/words';
+import { say } from '../support/words';
 
 const parameters = {
   adviceShare: { value: 0.005, unit: '', words: 'share of the drive that the divider may cost', source: 'common practice, no source' },

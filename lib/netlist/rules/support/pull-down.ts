@@ -1,3 +1,4 @@
+import { netWords } from '../../connectivity/net-words';
 import type { Circuit } from '../../circuit/circuit';
 import type { Stage } from '../../circuit/stages';
 import { acrossFrom, type Edge } from '../../circuit/graph';
@@ -7,7 +8,7 @@ import { magnitudeOf } from '../../circuit/part-facts';
 import type { Remedy } from '../../findings/finding';
 import { decadeOf } from '../../series/preferred-values';
 import { driverLimit, driverOhms } from './driver-limit';
-import { listWords, netWords, say } from './words';
+import { listWords, say } from './words';
 
 /** Edges of a stage's way that lie between a net of the gate's side and its control. */
 export function frontOf(stage: Stage, net: string): readonly Edge[] {

@@ -1,6 +1,5 @@
 import { isAlternating } from '../../circuit/source-role';
 import { formatQuantity } from '../../quantity/format-quantity';
-import type { Netlist } from '../../netlist';
 import type { RunPoint } from '../../points/point-set';
 import type { Station } from '../../points/station';
 
@@ -42,12 +41,4 @@ export function placeWords(point: RunPoint): string {
 export function listWords(words: readonly string[]): string {
   if (words.length < 2) return words[0] ?? '';
   return `${words.slice(0, -1).join(', ')} and ${words[words.length - 1]}`;
-}
-
-/** A net as people know it: `0 V`, the name they gave it, or a pin on it; a plug's contact only where nothing else is. */
-export function netWords(netlist: Netlist, name: string): string {
-  if (name === '0') return '0 V';
-  const net = netlist.nets.find((one) => one.name === name);
-  if (!net || net.givenNames.length > 0) return name;
-  return net.pins.find((pin) => !pin.includes('/')) ?? net.pins[0] ?? name;
 }
