@@ -1,6 +1,6 @@
 import { fileFromRoot } from './file-from-root.mjs';
 
-const nextWantsDefault = /^app\/(.*\/)?(page|layout|template|loading|error|global-error|not-found|default|opengraph-image|icon|sitemap|robots|manifest)\.tsx?$|^[^/]+\.config\.(mjs|mts|ts)$|^tests\/support\/[^/]+\.ts$/;
+const nextWantsDefault = /^app\/(.*\/)?(page|layout|template|loading|error|global-error|not-found|default|opengraph-image|icon|sitemap|robots|manifest)\.tsx?$|^[^/]+\.config\.(mjs|mts|ts)$|^tests\/support\/[^/]+\.ts$|\.d\.ts$/;
 
 /** Default exports only where Next (or a tool's configuration) demands them: a name is found by searching for it. @type {import('eslint').Rule.RuleModule} */
 export const namedExports = {

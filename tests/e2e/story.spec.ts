@@ -72,7 +72,7 @@ test('from a blank gate to a signed-off revision, by a maker, a reviewer and a m
     await maker.select('TP1');
     await maker.page.keyboard.press('Delete');
     await maker.saved();
-    await expect(maker.page.getByText(/draft, after/i).filter({ visible: true }).first()).toBeVisible();
+    await expect(maker.page.getByText(/draft,? after/i).filter({ visible: true }).first()).toBeVisible();
     await maker.page.goto(path);
     await expect(maker.page.getByText(/signed off to 15 V/i).filter({ visible: true }).first()).toBeVisible();
   });

@@ -36,7 +36,8 @@ export class CircuitPage {
   }
 
   async checked(): Promise<void> {
-    await expect(this.margin.getByText(/\d+ checks on [^,]+, \d/)).toBeVisible({ timeout: 45_000 });
+    // On a phone the margin is another pane.
+    await expect(this.page.getByText(/\d+ checks on [^,]+, \d/).first()).toBeAttached({ timeout: 45_000 });
   }
 
   async saved(): Promise<void> {

@@ -29,15 +29,19 @@ interface Fixtures {
   readonly stranger: (options?: { readonly phone?: boolean; readonly night?: boolean }) => Promise<Visit>;
   /** Console errors and page errors of every browser of the test; the test fails when any is left. */
   readonly complaints: string[];
+  /** What the test expects the browser itself to report, such as a refused request. */
+  readonly forgiven: RegExp[];
 }
 
 const phone = { viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true } as const;
 
 export const test = base.extend<Fixtures>({
-  complaints: [async ({}, provide) => {
+  forgiven: async ({}, provide) => { await provide([]); },
+
+  complaints: [async ({ forgiven }, provide) => {
     const complaints: string[] = [];
     await provide(complaints);
-    expect(complaints, 'errors in the console').toEqual([]);
+    expect(complaints.filter((line) => !forgiven.some((one) => one.test(line))), 'errors in the console').toEqual([]);
   }, { auto: true }],
 
   stranger: async ({ browser, complaints, baseURL }, provide) => {
