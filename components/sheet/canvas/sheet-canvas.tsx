@@ -26,6 +26,7 @@ import { frameBoxOf } from './sheet-frame-box';
 import { useCanvasKeys } from './use-canvas-keys';
 import { useCanvasPointer } from './use-canvas-pointer';
 import { useCanvasView } from './use-canvas-view';
+import { useChosenInView } from './use-chosen-in-view';
 import { WireEdgeView } from './wire-edge';
 import { ZoneRulers } from './zone-rulers';
 
@@ -72,6 +73,7 @@ function Canvas({ editor, state, label, volts = {}, lit = noParts, others = [], 
   const pointer = useCanvasPointer(editor, cursorTold);
   const keys = useCanvasKeys(editor);
   const view = useCanvasView(editor, frame, root);
+  useChosenInView(editor, root);
   const [geometry] = useState(() => new ReadingGeometry(sheet, frame, { x: 0, y: 0, scale: 1 }, { width: 0, height: 0 }, (point) => { void flow.setCenter(point.x, point.y, { zoom: flow.getZoom() }); }));
 
   useEffect(() => {
@@ -100,7 +102,7 @@ function Canvas({ editor, state, label, volts = {}, lit = noParts, others = [], 
         aria-label={label}
         aria-roledescription="schematic"
         data-tool={state.tool}
-        className="sheet-canvas relative min-h-0 flex-1 border-[1.5px] border-ink outline-none focus-visible:outline-2 focus-visible:outline-offset-2 focus-visible:outline-act max-tablet:border-0 print:min-h-[520px]"
+        className="sheet-canvas relative min-h-0 flex-1 border-[1.5px] border-ink outline-none [&_.react-flow\_\_edge:focus-visible_path]:stroke-act [&_.react-flow\_\_node:focus-visible]:outline-2 [&_.react-flow\_\_node:focus-visible]:outline-offset-4 [&_.react-flow\_\_node:focus-visible]:outline-act focus-visible:outline-2 focus-visible:outline-offset-2 focus-visible:outline-act max-tablet:border-0 print:min-h-[520px]"
       >
         <CanvasProvider value={context}>
           <ReactFlow
