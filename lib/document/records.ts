@@ -62,6 +62,7 @@ export const scenarioRecordSchema = z.object({
 export const holdPointRecordSchema = z.object({
   id,
   name: oneLine.min(1),
+  /** Scenario id. */
   scenario: z.string().optional(),
   /** Part id of the power source. */
   source: z.string().optional(),
