@@ -11,6 +11,6 @@ export function validUntil(chosen: string | undefined, now: Date): Date {
   const until = /^\d{4}-\d{2}-\d{2}$/.test(chosen) ? new Date(`${chosen}T23:59:59.999Z`) : new Date(chosen);
   const wrong = (message: string) => new Problem('input-wrong', `until: ${message}`, { errors: [{ path: 'until', message }] });
   if (until <= now) throw wrong('This is in the past.');
-  if (until.getTime() - now.getTime() > mostDays * day) throw wrong('A sign-off holds for a year at most.');
+  if (until.getTime() - now.getTime() > mostDays * day) throw wrong('A sign-off lasts a year at most.');
   return until;
 }

@@ -7,7 +7,7 @@ export type FactChanges = Readonly<Record<string, PartRecord['facts'][string] | 
 /** Why a fact cannot have this value; null when it can. Bounds are those of the vocabulary, in SI units. */
 export function refusedFact(key: string, value: FactChanges[string]): string | null {
   if (value === null) return null;
-  if (!factValueSchema.safeParse(value).success) return `${key} cannot hold that.`;
+  if (!factValueSchema.safeParse(value).success) return `${key} cannot be that.`;
   if (!isFactKey(key) || typeof value !== 'number') return null;
   const { label, unit, min, max } = factRegistry[key];
   if (!Number.isFinite(value)) return `${label} is a number.`;

@@ -3,7 +3,7 @@ import type { EngineNames } from './engine-names';
 
 /** What a guarded run that gave no result means to a person (docs/engine.md 1.2). */
 const words: Readonly<Record<string, string>> = {
-  singular: 'a node is held by nothing at DC, or sources close a ring',
+  singular: 'nothing sets the voltage of a node at DC, or sources close a ring',
   'no-convergence': 'the circuit has no operating point that the engine can find reliably',
   timestep: 'the run stopped before its end',
   timeout: 'the run took too long and was stopped',

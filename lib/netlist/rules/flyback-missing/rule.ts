@@ -85,7 +85,7 @@ function coilOutcome(circuit: Circuit, coil: NetlistPart, all: readonly Switched
     entity: coil.ref, quantity: 'energy', value: energy.joules, unit: 'J', source: `½·L·I² at ${say(coilAmps(circuit, worst), 'A')}`,
     limit: energy.limit, limitSource: energy.source,
   }] : [];
-  if (energy && energy.joules < energy.limit) return everywhere({ ...base, outcome: 'pass', message: `${coil.ref} holds ${say(energy.joules, 'J')}: ${transistor.ref} takes that itself`, evidence: energyEvidence });
+  if (energy && energy.joules < energy.limit) return everywhere({ ...base, outcome: 'pass', message: `${coil.ref} stores ${say(energy.joules, 'J')}: ${transistor.ref} takes that itself`, evidence: energyEvidence });
   return everywhere({
     ...base, outcome: 'fail', refs: [coil.ref, transistor.ref], nets: [worst.ends[0]],
     message: `${coil.ref} has no way on for its current when ${transistor.ref} opens: it breaks ${transistor.ref} down`,

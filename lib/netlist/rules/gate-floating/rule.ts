@@ -64,7 +64,7 @@ function stageOutcome(circuit: Circuit, stage: Stage, values: Values): Outcome {
   const { control } = terminalWords(stage);
   const base = { severity: 'stop', target: { transistor: [transistor.id] }, refs: [transistor.ref], nets: [terminals.control] } as const;
   const verdict = verdictOf(circuit, stage);
-  const paths = (value: number) => ({ entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'DC paths', value, unit: '', source: 'connections', limit: 1, limitSource: `an undriven ${control} must be held off` });
+  const paths = (value: number) => ({ entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'DC paths', value, unit: '', source: 'connections', limit: 1, limitSource: `an undriven ${control} must be kept off` });
   if (verdict === 'not examined') {
     return everywhere({
       ...base, outcome: 'undetermined', evidence: [], missing: 'a part not examined',

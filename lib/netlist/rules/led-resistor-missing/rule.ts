@@ -45,7 +45,7 @@ function outcomeOf(circuit: Circuit, branch: LedBranch, values: Values): Outcome
     entity: branch.leds[0]!.ref, quantity: 'series resistors', value, unit: '', source: 'connections', limit: 1, limitSource: 'an LED’s current rises tenfold in tenths of a volt: something must set it',
   });
   if (volts === 0) {
-    return everywhere({ ...base, outcome: 'pass', message: `${names}: the path holds a resistor`, evidence: [count(Math.max(1, branch.resistors.length))] });
+    return everywhere({ ...base, outcome: 'pass', message: `${names}: the path has a resistor`, evidence: [count(Math.max(1, branch.resistors.length))] });
   }
   const forward = branch.leds.reduce((sum, led) => sum + (magnitudeOf(led, 'vf') ?? 0), 0);
   return everywhere({

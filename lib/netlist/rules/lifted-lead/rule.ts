@@ -56,7 +56,7 @@ function openOutcome(circuit: Circuit, stage: Stage, leads: readonly LeadGroup[]
     outcome: 'fail', severity: 'stop', state: `lifted ${names[0] ?? ''}`,
     target: { transistor: [transistor.id] }, refs: [...names.slice(0, 2), transistor.ref, ...far.slice(0, 1)], nets: [terminals.control],
     message: `${listWords(names).replace(' and ', ' or ')} lifted: ${transistor.ref} ${control} has no DC path to ${reference}${far.length > 0 ? `; ${far[0]} comes off with the lead` : ''}`,
-    evidence: [{ entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'DC paths', value: 0, unit: '', source: `connections with ${names[0] ?? ''} lifted`, limit: 1, limitSource: `an undriven ${control} must be held off` }],
+    evidence: [{ entity: `${transistor.ref}:${terminals.controlPin}`, quantity: 'DC paths', value: 0, unit: '', source: `connections with ${names[0] ?? ''} lifted`, limit: 1, limitSource: `an undriven ${control} must be kept off` }],
     remedy: pullDownRemedy(circuit, stage, { leakage: leakageOf(stage).amps, volts: off * cautionShare }),
   });
 }
@@ -106,7 +106,7 @@ function resistiveOutcome(circuit: Circuit, stage: Stage, { lead, ohms }: Lifted
     ...withstands(stage, ohms, off.volts),
   ];
   const confidence = leakage.assumed ? 'likely' : 'proven';
-  if (!severity) return everywhere({ ...base, outcome: 'pass', confidence, message: `${lead.name} lifted: ${say(ohms, 'Ω')} hold ${transistor.ref} ${control} at its ${reference}`, evidence });
+  if (!severity) return everywhere({ ...base, outcome: 'pass', confidence, message: `${lead.name} lifted: ${say(ohms, 'Ω')} keep ${transistor.ref} ${control} at its ${reference}`, evidence });
   return everywhere({
     ...base, outcome: 'fail', severity, confidence, evidence,
     message: `${lead.name} lifted: ${say(leakage.amps, 'A')} of leakage${leakage.assumed ? ' (assumed)' : ''} through ${say(ohms, 'Ω')} lifts ${transistor.ref} ${control} to ${say(volts, 'V')}; it is on from ${say(off.volts, 'V')}`,

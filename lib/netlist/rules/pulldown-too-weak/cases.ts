@@ -14,7 +14,7 @@ export const cases: readonly RuleCase[] = [
   { name: 'just over half of the threshold', deck: pinStage('5.01k'), expect: { outcome: 'fail', severity: 'caution' } },
   { name: 'at half of the threshold', deck: pinStage('5k'), expect: { outcome: 'pass' } },
   { name: 'just under', deck: pinStage('4.99k'), expect: { outcome: 'pass' } },
-  { name: '4.7 kΩ against 50 kΩ', deck: pinStage('4.7k', '50k'), expect: { outcome: 'pass', says: 'R2 holds Q1 gate' } },
+  { name: '4.7 kΩ against 50 kΩ', deck: pinStage('4.7k', '50k'), expect: { outcome: 'pass', says: 'R2 keeps Q1 gate' } },
   { name: '10 MΩ against leakage', deck: leaky('10meg'), expect: { outcome: 'fail', severity: 'caution', says: '1 µA of leakage' } },
   { name: '22 kΩ against leakage', deck: leaky('22k'), expect: { outcome: 'pass' } },
   { name: 'no threshold given', deck: leaky('22k', 'vgs_max=20 rds_on=40m'), expect: { outcome: 'undetermined', says: 'V_GS(th) minimum' } },

@@ -57,7 +57,7 @@ function stageOutcome(circuit: Circuit, stage: Stage, thresholdShare: number): O
     entity: `${transistor.ref}:G`, quantity: 'voltage', value: lift.volts, unit: 'V', source: `${lift.words} against ${say(pullDown.ohms, 'Ω')}`,
     limit, limitSource: `${thresholdShare * 100} % of ${fact} of ${transistor.ref}, ${originOf(transistor, fact)}`,
   }];
-  if (!fails) return everywhere({ ...base, outcome: 'pass', message: `${pullDown.part.ref} holds ${transistor.ref} gate at ${say(lift.volts, 'V')}`, evidence });
+  if (!fails) return everywhere({ ...base, outcome: 'pass', message: `${pullDown.part.ref} keeps ${transistor.ref} gate at ${say(lift.volts, 'V')}`, evidence });
   const below = lift.below(limit);
   const better = chooseOhms(stage, pullDown.net, { leakage: leakageOf(stage).amps, volts: limit, below });
   return everywhere({
