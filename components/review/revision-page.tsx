@@ -55,7 +55,7 @@ export function RevisionPage({ letter, tab = 'revisions' }: { readonly letter: s
   const point = revision.holdPoints.find((one) => one.name === shown);
   const to = signedTo(revision, now);
   const chosen = entries.find((entry) => entry.key === selected);
-  const litParts = new Set(sheet.data?.sheet.parts.filter((part) => chosen && chosen.kind !== 'note' && chosen.finding.refs.includes(part.ref)).map((part) => part.id));
+  const litParts = new Set(sheet.data?.parts.filter((part) => chosen && chosen.kind !== 'note' && chosen.finding.refs.includes(part.ref)).map((part) => part.id));
   const rights = { write: may('write notes'), edit: false, mentor: may('resolve a note') && may('sign off'), personId: person?.id ?? null };
   const guestFoot = person ? undefined : (
     <div className="border-[1.5px] border-dashed border-edge p-4"><p className="text-body font-semibold">Members write here</p><p className="mb-2.5 text-md text-ink-2">Sign in, or ask a maker for an invitation to the bench.</p><ButtonLink href={`/sign-in?to=/circuits/${circuitId}/revisions/${letter}`}>Sign in to write</ButtonLink></div>
@@ -78,7 +78,7 @@ export function RevisionPage({ letter, tab = 'revisions' }: { readonly letter: s
           <div className={pane === 'drawing' ? 'flex min-w-0 flex-1' : 'flex min-w-0 flex-1 max-tablet:hidden'}>
             {sheet.data ? (
               <SheetViewer
-                sheet={sheet.data.sheet}
+                sheet={sheet.data}
                 label={`Schematic, revision ${letter}`}
                 lit={litParts}
                 volts={sheet.data.volts[shown ?? ''] ?? {}}
