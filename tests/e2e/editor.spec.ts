@@ -70,19 +70,19 @@ test('a sheet is drawn by keys and mouse, seen by another as it grows, and survi
     await page.mouse.click(at.x, at.y);
     await page.getByLabel('Net name', { exact: true }).fill('RAIL');
     await page.keyboard.press('Enter');
-    await expect(seen.part('R1')).toHaveAttribute('aria-label', /from RAIL to N1/);
+    await expect(seen.part('R1')).toHaveAttribute('aria-label', /from RAIL to V1:-/);
     await page.keyboard.press('1');
     await circuit.select('R1');
     await sheet.canvas.focus();
     await page.keyboard.press('ArrowRight');
     await page.keyboard.press('.');
-    await expect(seen.part('R1')).toHaveAttribute('aria-label', /from RAIL to N1/);
+    await expect(seen.part('R1')).toHaveAttribute('aria-label', /from RAIL to V1:-/);
   });
 
   await test.step('what was drawn is there after a reload', async () => {
     await circuit.saved();
     await page.reload();
-    await expect(sheet.part('R1')).toHaveAttribute('aria-label', /^R1, 33.kΩ, from RAIL to N1/);
+    await expect(sheet.part('R1')).toHaveAttribute('aria-label', /^R1, 33.kΩ, from RAIL to V1:-/);
     await expect(page.getByRole('button', { name: 'Undo' })).toHaveAttribute('aria-disabled', 'true');
   });
 });
