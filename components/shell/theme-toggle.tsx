@@ -1,6 +1,7 @@
 'use client';
 import { useSyncExternalStore } from 'react';
-import { IconButton } from '@/components/ui/button';
+import { buttonStyle } from '@/components/ui/button-style';
+import { Icon } from '@/components/ui/icon';
 import { parseTheme, themeCookie, type Theme } from './theme';
 
 const year = 31_536_000;
@@ -26,5 +27,10 @@ export function ThemeToggle() {
     document.documentElement.dataset.theme = other;
     document.cookie = `${themeCookie}=${other}; Path=/; Max-Age=${year}; SameSite=Lax`;
   };
-  return <IconButton icon={theme === 'day' ? 'moon' : 'sun'} label={`${other === 'night' ? 'Night' : 'Day'} bench`} onClick={change} />;
+  return (
+    <button type="button" data-theme-toggle="" aria-label="Night bench" title="Night bench" aria-pressed={theme === 'night'} onClick={change} className={buttonStyle('flat', 'regular', { square: true })}>
+      <Icon name="moon" className="night:hidden" />
+      <Icon name="sun" className="hidden night:block" />
+    </button>
+  );
 }

@@ -15,6 +15,8 @@ export const environmentSchema = z.object({
   PUBLIC_URL: withDefault(z.url({ protocol: /^https?$/ }), 'http://127.0.0.1:3000'),
   /** Address the realtime process listens on. */
   HOST: withDefault(z.string(), '127.0.0.1'),
+  /** Port that web listens on. */
+  PORT: withDefault(port, '3000'),
   DATABASE_URL: optional(z.url({ protocol: /^(mysql|mariadb)$/ })),
   REALTIME_PORT: withDefault(port, '3001'),
   /** Where browsers find realtime; without it `ws:` on REALTIME_PORT of the page's host. */
