@@ -3,7 +3,9 @@ import { boxesOverlap, type Box, type Point } from '@/lib/document/geometry/poin
 import { indexOf } from '@/lib/document/geometry/sheet-index';
 import { wirePath } from '@/lib/document/geometry/wire-path';
 import type { PartRecord, Sheet } from '@/lib/document/records';
+import { Near } from './near';
 import { ownWords, partWords } from './part-words';
+import { throughMarks } from './through-marks';
 
 export interface PlacedLabel {
   readonly part: string;
@@ -62,18 +64,40 @@ const overlap = (box: Box, segment: Segment): number => {
   return Math.max(across, down, 1);
 };
 
+const cache = new WeakMap<Sheet, readonly PlacedLabel[]>();
+
 /**
  * Where the words of each part stand: beside an upright symbol, above a level one, moved to another side when wires, symbols or
  * other words are in the way.
  */
 export function placeLabels(sheet: Sheet): readonly PlacedLabel[] {
+  const known = cache.get(sheet) ?? labelsOf(sheet);
+  cache.set(sheet, known);
+  return known;
+}
+
+function labelsOf(sheet: Sheet): readonly PlacedLabel[] {
   const index = indexOf(sheet);
-  const segments: Segment[] = sheet.wires.flatMap((wire) => {
+  const segments = new Near<Segment>();
+  for (const wire of sheet.wires) {
     const path = wirePath(index, wire);
-    return path.slice(1).map((b, at) => ({ a: path[at] ?? b, b }));
-  });
-  const bodies = new Map(sheet.parts.map((part) => [part.id, partBoxOf(part)]));
-  const taken: Box[] = sheet.parts.filter((part) => part.kind === 'net-name').map((part) => netNameBox(part));
+    path.slice(1).forEach((b, at) => {
+      const a = path[at] ?? b;
+      segments.add({ left: Math.min(a.x, b.x), top: Math.min(a.y, b.y), right: Math.max(a.x, b.x), bottom: Math.max(a.y, b.y) }, { a, b });
+    });
+  }
+  const bodies = new Near<{ readonly id: string; readonly box: Box }>();
+  for (const part of sheet.parts) {
+    const box = partBoxOf(part);
+    bodies.add(box, { id: part.id, box });
+  }
+  const taken = new Near<Box>();
+  const through = throughMarks(sheet);
+  for (const part of sheet.parts) {
+    if (part.kind !== 'net-name') continue;
+    const box = through.has(part.id) ? throughBox(part) : netNameBox(part);
+    taken.add(box, box);
+  }
   const placed: PlacedLabel[] = [];
   for (const part of sheet.parts) {
     const words = partWords(part);
@@ -83,16 +107,23 @@ export function placeLabels(sheet: Sheet): readonly PlacedLabel[] {
     let best: { readonly label: PlacedLabel; readonly cost: number } | null = null;
     for (const [rank, label] of candidates(part, width, lines.length).entries()) {
       let cost = rank * 3;
-      for (const segment of segments) if (segmentInBox(segment, label.box)) cost += 20 + overlap(label.box, segment);
-      for (const [id, body] of bodies) if (id !== part.id && boxesOverlap(label.box, body)) cost += 60;
-      for (const box of taken) if (boxesOverlap(label.box, box)) cost += 120;
+      for (const segment of segments.within(label.box)) if (segmentInBox(segment, label.box)) cost += 20 + overlap(label.box, segment);
+      for (const { id, box } of bodies.within(label.box)) if (id !== part.id && boxesOverlap(label.box, box)) cost += 60;
+      for (const box of taken.within(label.box)) if (boxesOverlap(label.box, box)) cost += 120;
       if (best === null || cost < best.cost) best = { label, cost };
     }
     if (!best) continue;
-    taken.push(best.label.box);
+    taken.add(best.label.box, best.label.box);
     placed.push(best.label);
   }
   return placed;
+}
+
+/** Box of a net name's words beside the line that runs through it. */
+function throughBox(part: PartRecord): Box {
+  const width = ownWords(part).length * letter;
+  const upright = part.turn === 90 || part.turn === 270;
+  return upright ? { left: part.x + 6, top: part.y - 7, right: part.x + 7 + width, bottom: part.y + 7 } : { left: part.x - width / 2, top: part.y - 17, right: part.x + width / 2, bottom: part.y - 4 };
 }
 
 /** Box of a net name's own words, which stand on the side its mark points to. */

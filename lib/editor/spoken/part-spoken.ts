@@ -31,11 +31,9 @@ export function spokenPart(sheet: Sheet, part: PartRecord): string {
   return `${lead}, ${pins.map(([pin, net]) => `${pin} on ${netWords(netlist, net, part.ref)}`).join(', ')}${open}`;
 }
 
-/** What a wire joins, as it is spoken: `Wire, net GATE: Q1:G, R3:2`. */
-export function spokenWire(sheet: Sheet, wireId: string): string {
-  const number = drawnNets(sheet).findIndex((net) => net.wires.includes(wireId));
+/** What a net joins, as a wire of it is spoken: `Wire, net GATE: Q1:G, R3:2`. */
+function spokenNet(sheet: Sheet, number: number, refs: ReadonlyMap<string, string>): string {
   const name = drawnNetNames(sheet)[number];
-  const refs = new Map(sheet.parts.map((part) => [part.id, part.ref]));
   const pins = (drawnNets(sheet)[number]?.pins ?? []).filter((pin) => refs.get(pin.part)).map((pin) => `${refs.get(pin.part)}:${pin.pin}`);
   if (name === undefined) return 'Wire, joins no part';
   const net = sheetToNetlist(sheet).nets.find((one) => one.name === name);
@@ -43,14 +41,22 @@ export function spokenWire(sheet: Sheet, wireId: string): string {
   return `Wire, ${called}${pins.length > 0 ? `: ${pins.slice(0, 8).join(', ')}` : ''}`;
 }
 
+/** What a wire joins, as it is spoken. */
+export const spokenWire = (sheet: Sheet, wireId: string): string => spokenItems(sheet).get(wireId) ?? 'Wire, joins no part';
+
 const cache = new WeakMap<Sheet, ReadonlyMap<string, string>>();
 
 /** What every part and wire of a sheet is called aloud, by id; worked out once for each sheet. */
 export function spokenItems(sheet: Sheet): ReadonlyMap<string, string> {
-  const known = cache.get(sheet) ?? new Map([
-    ...sheet.parts.map((part) => [part.id, spokenPart(sheet, part)] as const),
-    ...sheet.wires.map((wire) => [wire.id, spokenWire(sheet, wire.id)] as const),
-  ]);
-  cache.set(sheet, known);
-  return known;
+  const known = cache.get(sheet);
+  if (known) return known;
+  const refs = new Map(sheet.parts.map((part) => [part.id, part.ref]));
+  const spoken = new Map(sheet.parts.map((part) => [part.id, spokenPart(sheet, part)] as const));
+  drawnNets(sheet).forEach((net, number) => {
+    if (net.wires.length === 0) return;
+    const words = spokenNet(sheet, number, refs);
+    net.wires.forEach((wire) => spoken.set(wire, words));
+  });
+  cache.set(sheet, spoken);
+  return spoken;
 }
