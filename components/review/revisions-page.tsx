@@ -4,6 +4,7 @@ import { CautionsLine } from '@/components/circuit/cautions-line';
 import { CircuitFrame } from '@/components/circuit/circuit-frame';
 import { useCircuitPlace, useMay } from '@/components/circuit/circuit-context';
 import { LadderRow } from '@/components/circuit/ladder-row';
+import { MakersPanel } from '@/components/circuit/makers-panel';
 import { CircuitLoading } from '@/components/circuit/page-state';
 import { RevisionBlock } from '@/components/circuit/revision-block';
 import { signedState } from '@/components/circuit/signed-state';
@@ -59,6 +60,7 @@ export function RevisionsPage() {
           {revisions.data.length === 0 ? (
             <div className="max-w-[520px] max-tablet:px-3.5"><StateBox title="No revision yet" action={may('cut a revision') ? <Button tone="primary" icon="cut" onClick={() => setCutting(true)}>Cut revision A</Button> : <ButtonLink href={`/circuits/${circuitId}`}>To the sheet</ButtonLink>}>A revision is a cut of the sheet that cannot change any more: that is what a mentor signs.</StateBox></div>
           ) : <RevisionList revisions={revisions.data} circuitId={circuitId} />}
+          <MakersPanel circuit={circuit.data} />
           <ObjectionsPanel objections={objections} personId={person?.id ?? null} mayOverride={may('override an objection')} acts={acts} />
         </div>
       </div>
