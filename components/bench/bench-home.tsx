@@ -7,6 +7,7 @@ import { KeyGroup } from '@/components/ui/key-group';
 import { Select } from '@/components/ui/select';
 import { StateBox } from '@/components/ui/state-box';
 import { circuitStates, type Circuit } from '@/lib/schemas/circuit';
+import { ActivityList } from './activity-list';
 import { BenchEmpty } from './bench-empty';
 import { BenchHead } from './bench-head';
 import { CircuitCards } from './circuit-cards';
@@ -83,7 +84,7 @@ export function BenchHome({ bench, name, person, mayPost }: BenchHomeProps) {
             {hasNextPage ? <div className="mt-4 max-tablet:p-4"><Button busy={isFetching} onClick={() => void fetchNextPage()}>Older circuits</Button></div> : null}
             <div className="mt-6 max-wide:hidden"><LadderKey /></div>
           </div>
-          <aside className="max-wide:order-1 max-tablet:border-b max-tablet:border-ink"><WaitingList circuits={data} person={person} /></aside>
+          <aside className="max-wide:order-1 max-tablet:border-b max-tablet:border-ink"><WaitingList circuits={data} person={person} /><ActivityList bench={bench} circuits={data} /></aside>
         </div>
       </div>
     </>
