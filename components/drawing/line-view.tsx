@@ -1,10 +1,11 @@
 import { HatchMark } from '@/components/ladder/hatch-mark';
 import { voltsWords } from '@/components/ladder/plan-words';
 import type { Point } from '@/lib/document/geometry/point';
-import { endKey, indexOf } from '@/lib/document/geometry/sheet-index';
+import { indexOf } from '@/lib/document/geometry/sheet-index';
 import { wirePath } from '@/lib/document/geometry/wire-path';
 import type { Sheet } from '@/lib/document/records';
 import { isHot, netOfLines } from './hot-wires';
+import { meetingPlaces } from './meeting-places';
 
 const pathOf = (points: readonly Point[]) => points.map((point, index) => `${index === 0 ? 'M' : 'L'}${point.x} ${point.y}`).join('');
 
@@ -42,13 +43,13 @@ export function LineView({ sheet, volts }: LineViewProps) {
   const lines = sheet.wires.map((wire) => ({ id: wire.id, net: nets.get(wire.id), path: wirePath(index, wire) }));
   const hot = lines.filter((line) => line.net !== undefined && isHot(volts[line.net]));
   const safe = lines.filter((line) => !hot.includes(line));
-  const dots = sheet.junctions.filter((junction) => (index.wiresAt.get(endKey({ at: 'junction', junction: junction.id }))?.length ?? 0) > 2);
+  const dots = [...meetingPlaces(sheet)].map((place) => place.split(',').map(Number) as [number, number]);
   return (
     <>
       <path d={safe.map((line) => pathOf(line.path)).join('')} className="fill-none stroke-ink" strokeWidth="1.5" strokeLinecap="square" />
       <path d={hot.map((line) => pathOf(line.path)).join('')} className="fill-none stroke-ink" strokeWidth="5.6" />
       <path d={hot.map((line) => pathOf(line.path)).join('')} className="fill-none stroke-film" strokeWidth="2.6" />
-      {dots.map((junction) => <circle key={junction.id} cx={junction.x} cy={junction.y} r="3" className="fill-ink" />)}
+      {dots.map(([x, y]) => <circle key={`${x} ${y}`} cx={x} cy={y} r="3" className="fill-ink" />)}
       {[...tags(hot)].map(([net, { a, b, length }]) => {
         if (length < 40) return null;
         const level = a.y === b.y;

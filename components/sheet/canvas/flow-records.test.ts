@@ -42,7 +42,8 @@ it('knows joined, lone and open pins', () => {
   const apart = { ...stage, wires: stage.wires.filter((wire) => wire.id !== 'G1:+ R3:1'), parts: stage.parts.map((part) => (part.id === 'R3' ? { ...part, leftOpen: ['1'] } : part)) };
   expect(pinStates(apart).get('R3')).toBe('open joined');
   expect(pinStates(apart).get('G1')).toBe('lone joined');
-  expect(pinStates(stage).get('N1')).toBe('joined');
+  expect(pinStates(stage).get('N1')).toBe('met');
+  expect(pinStates(stage).get('Z1')).toBe('joined');
 });
 
 it('frames a sheet by its plain size, grown by whole squares', () => {

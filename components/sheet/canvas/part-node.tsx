@@ -13,12 +13,13 @@ import { pinStates } from './pin-states';
 
 const quiet = new Set(['net-name', 'note']);
 
-/** A loose pin has a 45° tick, one left open a short bar square to its stub, a joined one no mark. */
+/** A loose pin has a 45° tick, one left open a short bar square to its stub, a joined one no mark, one where three lines meet a dot. */
 function PinMarks({ part }: { readonly part: PartRecord }) {
   const { editor } = useCanvas();
   const states = useEditorValue(editor, (state) => pinStates(state.sheet).get(part.id) ?? '').split(' ');
-  if (quiet.has(part.kind)) return null;
   return pinPlacesOf(part).map((pin, index) => {
+    if (states[index] === 'met') return <circle key={pin.pin} cx={pin.x} cy={pin.y} r="3" className="fill-ink" />;
+    if (quiet.has(part.kind)) return null;
     if (states[index] === 'lone') return <path key={pin.pin} d={`M${pin.x - 4} ${pin.y + 4}L${pin.x + 4} ${pin.y - 4}`} className="fill-none stroke-ink" strokeWidth="1.2" />;
     if (states[index] !== 'open') return null;
     const end = { x: pin.x + pin.out.x * 10, y: pin.y + pin.out.y * 10 };
