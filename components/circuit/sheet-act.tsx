@@ -18,11 +18,10 @@ interface SheetActProps {
   readonly moved: boolean;
   readonly snapshot: SheetSnapshot | null;
   readonly onPlan: (() => void) | null;
-  readonly full?: boolean;
 }
 
 /** The next act on a sheet: set the plan, cut a revision, ask for its review. */
-export function SheetAct({ entries, plan, revisions, moved, snapshot, onPlan, full = false }: SheetActProps) {
+export function SheetAct({ entries, plan, revisions, moved, snapshot, onPlan }: SheetActProps) {
   const { circuitId } = useCircuitPlace();
   const may = useMay();
   const [cutting, setCutting] = useState(false);
@@ -32,23 +31,19 @@ export function SheetAct({ entries, plan, revisions, moved, snapshot, onPlan, fu
   const blocked = plan.find((point) => stops.some((stop) => stop.kind === 'stop' && (stop.finding.holdPoint === null || stop.finding.holdPoint === point.name)));
   const words = plan.length === 0 ? 'No power-up plan yet'
     : stops.length === 0 ? 'No stop is open' : `${stops.length} ${stops.length === 1 ? 'stop blocks' : 'stops block'} ${blocked ? pointWords(blocked) : 'the plan'}`;
-  const size = full ? 'large' as const : 'regular' as const;
-  const width = full ? 'w-full' : 'self-start';
   const unsaved = unsavedWords(snapshot);
   return (
     <>
-      {full ? null : (
-        <p>
-          <b className="block font-medium text-silk">{words}</b>
-          {onPlan ? <button type="button" onClick={onPlan} className="min-h-6 text-left underline underline-offset-[3px]">{plan.length === 0 ? 'Set the plan' : 'Change the plan'}</button>
-            : newest && !moved ? `The sheet is as ${newest.letter}` : may('cut a revision') ? `Cut ${letter}, then ask for review` : 'A draft: nothing covers it'}
-        </p>
-      )}
-      {may('cut a revision') ? (
-        newest && !moved && newest.state === 'cut'
-          ? <ButtonLink href={`/circuits/${circuitId}/revisions/${newest.letter}/ask`} tone="primary" size={size} className={width}>Ask for review of {newest.letter}</ButtonLink>
-          : <Button tone="primary" icon="cut" size={size} className={width} refused={unsaved} onClick={() => setCutting(true)}>Cut revision {letter}</Button>
-      ) : newest ? <ButtonLink href={`/circuits/${circuitId}/revisions/${newest.letter}`} size={size} className={width}>Revision {newest.letter}</ButtonLink> : null}
+      <p>
+        <b className="block font-medium text-silk">{words}</b>
+        {onPlan ? <button type="button" onClick={onPlan} className="min-h-6 text-left underline underline-offset-[3px]">{plan.length === 0 ? 'Set the plan' : 'Change the plan'}</button>
+          : newest && !moved ? `The sheet is as ${newest.letter}` : may('cut a revision') ? `Cut ${letter}, then ask for review` : 'A draft: nothing covers it'}
+      </p>
+      {may('ask for review') && newest && !moved && newest.state === 'cut'
+        ? <ButtonLink href={`/circuits/${circuitId}/revisions/${newest.letter}/ask`} tone="primary" className="self-start">Ask for review of {newest.letter}</ButtonLink>
+        : may('cut a revision') && (moved || !newest)
+          ? <Button tone="primary" icon="cut" className="self-start" refused={unsaved} onClick={() => setCutting(true)}>Cut revision {letter}</Button>
+          : newest ? <ButtonLink href={`/circuits/${circuitId}/revisions/${newest.letter}`} className="self-start">Revision {newest.letter}</ButtonLink> : null}
       {cutting ? <CutDialog circuitId={circuitId} letter={letter} seq={snapshot?.seq} onClose={() => setCutting(false)} /> : null}
     </>
   );

@@ -71,7 +71,7 @@ export function SheetPage() {
   const point = points.find((one) => one.name === shown);
   const under = draftWords(newest, moved);
   const noteOn = (anchor: Anchor, words: string) => { setDraft({ anchor, words }); setPane('margin'); };
-  const act = (full: boolean) => <SheetAct entries={entries} plan={plan} revisions={revisions.data} moved={moved !== 'not'} snapshot={snapshot} onPlan={may('edit the sheet') ? () => setPlanning(true) : null} full={full} />;
+  const act = <SheetAct entries={entries} plan={plan} revisions={revisions.data} moved={moved !== 'not'} snapshot={snapshot} onPlan={may('edit the sheet') ? () => setPlanning(true) : null} />;
   return (
     <CircuitFrame
       title={circuit.data.title}
@@ -79,7 +79,7 @@ export function SheetPage() {
       tab="sheet"
       letters={revisions.data.map((one) => one.letter)}
       people={<PeopleOnSheet people={roomPeople(snapshot)} />}
-      ladder={<LadderRow block={<RevisionBlock letter={null} title={under} under={circuit.data.makers.map((maker) => maker.name).join(', ')} />} points={points} shown={shown} onShow={show} signed={signedState(revisions.data, null, moved !== 'not', new Date())} flags={stopFlags(entries, points)} act={act(false)} />}
+      ladder={<LadderRow block={<RevisionBlock letter={null} title={under} under={circuit.data.makers.map((maker) => maker.name).join(', ')} />} points={points} shown={shown} onShow={show} signed={signedState(revisions.data, null, moved !== 'not', new Date())} flags={stopFlags(entries, points)} act={act} />}
       cautions={point && point.peak > touchSafeVolts ? <CautionsLine volts={point.peak} /> : null}
       foot={<>{session && snapshot ? <RefusedEdits session={session} snapshot={snapshot} /> : null}<PhoneSwitch pane={pane} count={entries.length} onPane={setPane} /></>}
       tools={editor ? <ToolStrip editor={editor} onCommands={() => setListing(!listing)} /> : null}
