@@ -94,7 +94,7 @@ export function SignOffPage({ letter }: { readonly letter: string }) {
           </>
         )}
         <div className="mt-3.5 grid grid-cols-2 items-start gap-6 pb-4 max-wide:grid-cols-1 max-wide:gap-3.5 max-tablet:mt-0">
-          {maySign ? <SignForm key={holdPoint} revision={revision} holdPoint={holdPoint} refused={refused} person={person} undetermined={undetermined} acts={acts} onSigned={() => { toast(`Signed off. ${letter} alone is covered.`); router.push(`/circuits/${circuitId}/revisions/${letter}`); }} onAskForChanges={mayObject && open ? () => setObjecting(true) : null} /> : null}
+          {maySign ? <SignForm key={holdPoint} revision={revision} holdPoint={holdPoint} refused={refused} person={person} undetermined={undetermined} acts={acts} onSigned={() => { toast(`Signed off. ${letter} alone is covered.`); router.push(`/circuits/${circuitId}/revisions/${letter}`); }} onAskForChanges={mayObject && revision.state !== 'signed off' && open ? () => setObjecting(true) : null} /> : null}
           <div className="space-y-3.5">
             <RefusedPanel revision={revision} rows={rows} free={free} circuitId={circuitId} />
             <ObjectionsPanel objections={revision.objections} personId={person.id} mayOverride={may('override an objection')} acts={acts} />
