@@ -18,7 +18,7 @@ describe('packages', () => {
   it('are used: every one is named somewhere', () => {
     const written = [...sourceFiles(), 'package.json'].map((file) => (file === 'package.json' ? JSON.stringify(JSON.parse(textOf(file)).scripts) : textOf(file))).join('\n');
     // Attachments and outgoing mail come with their screens; the stack that they were proven in is kept together.
-    const toolsOnly = /^@types\/|^(typescript|vite|tailwindcss|react-dom|drizzle-kit|yjs|y-protocols|lib0|nodemailer|@aws-sdk\/client-s3)$/;
+    const toolsOnly = /^@types\/|^(typescript|vite|tailwindcss|react-dom|drizzle-kit|yjs|y-protocols|lib0)$/;
     const unused = Object.keys(manifest.dependencies).filter((name) => !toolsOnly.test(name) && !written.includes(name));
     expect(unused).toEqual([]);
   });
