@@ -25,7 +25,7 @@ export function LadderRail({ scale, signed, ground }: LadderRailProps) {
           <path d={`M${limit} 41H${right + 10}`} stroke={ground} strokeWidth="2.6" />
         </>
       ) : null}
-      {scale.ticks.map(({ volts, major }) => (
+      {scale.ticks.filter(({ volts }) => x(volts) <= right).map(({ volts, major }) => (
         <path key={volts} d={`M${x(volts)} 36v2M${x(volts)} 44v2.5`} className={major ? 'stroke-silk' : 'stroke-edge'} />
       ))}
       {signed.past ? <rect x={left + 1} y="25.2" width={x(signed.past.to) - left} height="8.6" className="fill-none stroke-signed-ink" strokeWidth="1.4" strokeDasharray="4 3" /> : null}

@@ -4,6 +4,7 @@ import { touchSafeVolts, type LadderPoint } from './ladder-point';
 export interface LadderScale {
   readonly x: (volts: number) => number;
   readonly left: number;
+  /** Where the plan ends; the scale goes on to the touch-safe limit where the plan stays below it. */
   readonly right: number;
   /** Volts of the marks on the rail; a decade is major. */
   readonly ticks: readonly { readonly volts: number; readonly major: boolean }[];
@@ -33,5 +34,5 @@ export function ladderScale(points: readonly Pick<LadderPoint, 'peak'>[], left: 
       if (volts >= from && volts <= to) ticks.push({ volts, major: digit === 1 });
     }
   }
-  return { x, left, right: x(to), ticks };
+  return { x, left, right: peaks.length === 0 ? x(to) : x(Math.max(...peaks)), ticks };
 }
