@@ -8,14 +8,19 @@ import { useEditorValue } from '../canvas/canvas-context';
 import { ResistorForm } from './resistor-form';
 import { searchKinds } from './search-kinds';
 
+/** Size of a symbol in the drawer, pixels. */
+const keyIcon = { width: 56, height: 32 };
+
 function KindKey({ kind, zigzag, onTake, onDragStart }: { readonly kind: Kind; readonly zigzag: boolean; readonly onTake: () => void; readonly onDragStart: () => void }) {
   const art = artOf(kind.id, zigzag);
   const [left, top, right, bottom] = art.box;
-  const side = Math.max(right - left, bottom - top, 60) + 10;
-  const [x, y] = [(left + right) / 2 - side / 2, (top + bottom) / 2 - side / 4];
+  // The whole symbol with room for its strokes; small ones are drawn no larger than the others.
+  const width = Math.max(right - left + 6, ((bottom - top + 6) * keyIcon.width) / keyIcon.height, 80);
+  const height = (width * keyIcon.height) / keyIcon.width;
+  const [x, y] = [(left + right - width) / 2, (top + bottom - height) / 2];
   return (
     <button type="button" data-kind={kind.id} onClick={onTake} onPointerDown={(event) => { if (event.button === 0 && event.pointerType === 'mouse') onDragStart(); }} className="flex min-h-9 w-full items-center gap-2 px-2 text-left text-sm text-silk hover:bg-key-hi focus-visible:outline-2 focus-visible:-outline-offset-2 focus-visible:outline-act">
-      <svg width="56" height="28" viewBox={`${x} ${y} ${side} ${side / 2}`} aria-hidden="true" className="flex-none [--film:var(--panel)] [--ink:var(--silk)]"><SymbolView art={art} /></svg>
+      <svg width={keyIcon.width} height={keyIcon.height} viewBox={`${x} ${y} ${width} ${height}`} aria-hidden="true" className="flex-none [--film:var(--panel)] [--ink:var(--silk)]"><SymbolView art={art} /></svg>
       <span className="min-w-0 leading-tight">{kind.title}</span>
     </button>
   );
@@ -36,7 +41,11 @@ export const PartDrawer = memo(function PartDrawer({ editor, zigzag, onZigzag, o
   const search = useRef<HTMLInputElement>(null);
   const list = useRef<HTMLDivElement>(null);
   const asked = useEditorValue(editor, (state) => state.tool === 'add' && state.ghost === null);
-  useEffect(() => { if (asked) search.current?.focus(); }, [asked]);
+  useEffect(() => {
+    if (!asked) return;
+    search.current?.focus();
+    search.current?.select();
+  }, [asked]);
   const groups = searchKinds(typed);
   const take = (kind: Kind) => {
     editor.run('hold-part', { kind: kind.id });

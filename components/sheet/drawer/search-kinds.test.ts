@@ -8,6 +8,9 @@ it('finds kinds by title, letter and the words people use', () => {
   expect(found('zen')).toEqual(['zener']);
   expect(found('gnd')).toEqual(['zero-volt']);
   expect(found('mosfet n')).toContain('nmos');
+  expect(found('n-mos')).toEqual(['nmos']);
+  expect(found('N-channel')).toEqual(['nmos']);
+  expect(found('mosfet, p')).toEqual(['pmos']);
   expect(found('flux')).toEqual([]);
   expect(found('  ')).toHaveLength(26);
 });
