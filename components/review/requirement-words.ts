@@ -14,7 +14,7 @@ export interface RequirementRow {
 }
 
 const words: Readonly<Record<string, string>> = {
-  'newer-revision': 'Newest revision in review',
+  'newer-revision': 'No newer one in review',
   'stale-hash': 'The hash sent is the hash stored',
   contributor: 'You made no part of it',
   'sign-in-again': 'Signed in less than 12 h ago',
