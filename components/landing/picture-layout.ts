@@ -34,7 +34,7 @@ export function layOutPicture(sheet: Sheet, entries: readonly FindingEntry[]): {
     return target ? [[entry.key, target] as const] : [];
   }));
   const column = layOutColumn(entries.map((entry) => ({ key: entry.key, y: targets.get(entry.key)?.ends[0]?.y ?? null, height: heightOf(entry) })), pictureSize.height, 10);
-  const view = { of: targets, texts: geometry.texts(), ...extent };
+  const view = { of: targets, texts: geometry.texts(), obstacles: geometry.obstacles(), ...extent };
   const stacked = entries.map((entry) => ({ key: entry.key, top: column.tops.get(entry.key) ?? 0, height: heightOf(entry) })).sort((a, b) => a.top - b.top);
   const tops = settleTops(stacked, view, 0, pictureSize.height, 10);
   const placed = entries.map((entry) => ({ entry, top: tops.get(entry.key) ?? 0 })).filter(({ entry, top }) => top + heightOf(entry) <= pictureSize.height + 8).sort((a, b) => a.top - b.top);

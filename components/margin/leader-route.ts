@@ -1,4 +1,4 @@
-import type { Box, Place } from './sheet-geometry';
+import type { Box, Obstacles, Place } from './sheet-geometry';
 
 export interface Leader {
   /** Leaves the column level, bends once, ends on the target. */
@@ -60,13 +60,18 @@ export interface RoutedLeader {
   readonly leader: Leader;
   /** Texts that it crosses; 0 wherever there is a way round. */
   readonly texts: number;
+  /** Symbols that it crosses, and level wires that it runs along. */
+  readonly obstacles: number;
 }
+
+const nothing: Obstacles = { symbols: [], levelWires: [] };
 
 /**
  * Routes one leader from the column at `from` to one of `ends`: level, one bend, then straight. Of all bends on the level
- * run, and all ends, the one that crosses no text wins, then the one that crosses fewest leaders, then the shortest one.
+ * run, and all ends, the one that crosses no text wins, then the one that crosses fewest leaders and obstacles, then the
+ * shortest one.
  */
-export function routeLeader(from: Place, ends: readonly Place[], texts: readonly Box[], others: readonly Leader[]): RoutedLeader | null {
+export function routeLeader(from: Place, ends: readonly Place[], texts: readonly Box[], others: readonly Leader[], { symbols, levelWires }: Obstacles = nothing): RoutedLeader | null {
   let best: (RoutedLeader & { readonly cost: number }) | null = null;
   for (const [rank, end] of ends.entries()) {
     const nearest = Math.min(from.x - 10, end.x + 10);
@@ -79,8 +84,9 @@ export function routeLeader(from: Place, ends: readonly Place[], texts: readonly
       const cost = length + crossed * 4_000;
       if (best !== null && cost >= best.cost) continue;
       const leader: Leader = { from, bend, end };
-      const full = cost + crossedLeaders(leader, others) * 1_000;
-      if (best === null || full < best.cost) best = { leader, texts: crossed, cost: full };
+      const obstacles = levelTexts(symbols, from.y, x, from.x) + slantTexts(symbols, bend, end) + levelTexts(levelWires, from.y, x, from.x);
+      const full = cost + crossedLeaders(leader, others) * 1_000 + obstacles * 300;
+      if (best === null || full < best.cost) best = { leader, texts: crossed, obstacles, cost: full };
     }
   }
   return best;

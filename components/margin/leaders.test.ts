@@ -6,7 +6,7 @@ import type { Targets } from './use-targets';
 const text = { left: 300, top: 90, right: 380, bottom: 110 };
 const targets: Targets = {
   of: new Map([['a', { ends: [{ x: 200, y: 100 }], zone: 'A1', words: 'R1' }], ['b', { ends: [{ x: 200, y: 300 }], zone: 'C1', words: 'R2' }]]),
-  texts: [text], width: 600, height: 500,
+  texts: [text], obstacles: { symbols: [], levelWires: [] }, width: 600, height: 500,
 };
 
 describe('settleTops', () => {

@@ -24,7 +24,7 @@ export function routeLeaders(wanted: readonly LeaderWanted[], targets: Targets, 
   for (const entry of [...wanted].sort((a, b) => a.top - b.top)) {
     const y = entry.top + ruleOffset + 0.5;
     if (y < columnTop || y > targets.height) continue;
-    const leader = routeLeader({ x: targets.width, y }, visibleEnds(targets, entry.key), targets.texts, level)?.leader;
+    const leader = routeLeader({ x: targets.width, y }, visibleEnds(targets, entry.key), targets.texts, level, targets.obstacles)?.leader;
     if (!leader) continue;
     level.push(leader);
     routed.push({ ...leader, from: { x: targets.width + 12, y }, key: entry.key, kind: entry.kind, on: entry.on });
@@ -41,8 +41,13 @@ interface Standing {
 /** How far an entry may leave its level to spare a text, px, nearest first. */
 const shifts = [0, -14, 14, -28, 28, -44, 44, -64, 64];
 
+/** An entry leaves its level this many times at most to spare a symbol or a wire; a text weighs more than all of those. */
+const shiftsForObstacles = 5;
+const aText = 1_000;
+
 /**
- * Moves entries a little up or down within the room between their neighbours, so that their leaders cross no text. Order and
+ * Moves entries a little up or down within the room between their neighbours, so that their leaders cross no text and, where
+ * that is near, no symbol. Order and
  * distances stay. `columnTop` is where the column begins on the canvas.
  */
 export function settleTops(entries: readonly Standing[], targets: Targets, columnTop: number, room: number, gap = 6): ReadonlyMap<string, number> {
@@ -52,13 +57,14 @@ export function settleTops(entries: readonly Standing[], targets: Targets, colum
     const next = entries[index + 1];
     const highest = Math.max(free, (next ? next.top - gap : Math.max(room, top + height)) - height);
     const ends = visibleEnds(targets, key);
-    let best = { top: Math.max(free, top), texts: Infinity };
-    for (const shift of ends.length === 0 ? [0] : shifts) {
+    let best = { top: Math.max(free, top), burden: Infinity };
+    for (const [tries, shift] of (ends.length === 0 ? [0] : shifts).entries()) {
+      if (tries >= shiftsForObstacles && best.burden < aText) break;
       const tried = Math.min(highest, Math.max(free, top + shift));
-      const routed = routeLeader({ x: targets.width, y: columnTop + tried + ruleOffset + 0.5 }, ends, targets.texts, []);
-      const texts = routed?.texts ?? 0;
-      if (texts < best.texts) best = { top: tried, texts };
-      if (best.texts === 0) break;
+      const routed = routeLeader({ x: targets.width, y: columnTop + tried + ruleOffset + 0.5 }, ends, targets.texts, [], targets.obstacles);
+      const burden = (routed?.texts ?? 0) * aText + (routed?.obstacles ?? 0);
+      if (burden < best.burden) best = { top: tried, burden };
+      if (best.burden === 0) break;
     }
     tops.set(key, best.top);
     free = best.top + height + gap;

@@ -34,11 +34,11 @@ function kindOf(finding: Finding): FindingEntry['kind'] | null {
   return finding.outcome === 'fail' ? finding.severity : null;
 }
 
-/** A finding is tied to the part to change; one that names no part, to its net. */
+/** A finding is tied to the part to change, one about a single net of a transistor to that net; one that names no part, to its net. */
 function anchorOfFinding(finding: Finding): MarginAnchor | null {
   const [ref] = finding.refs;
-  if (ref !== undefined) return { kind: 'ref', ref };
   const [net] = finding.nets;
+  if (ref !== undefined) return net !== undefined && finding.nets.length === 1 ? { kind: 'ref', ref, on: { net, refs: finding.refs } } : { kind: 'ref', ref };
   return net === undefined ? null : { kind: 'net', name: net };
 }
 

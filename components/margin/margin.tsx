@@ -1,5 +1,5 @@
 'use client';
-import { useEffect, useMemo, useRef, useState, type ReactNode } from 'react';
+import { useEffect, useMemo, useRef, useState, type MouseEvent, type ReactNode } from 'react';
 import { classNames } from '@/components/ui/class-names';
 import { phoneQuery, useMedia, wideQuery } from '@/components/ui/use-media';
 import type { Anchor } from '@/lib/schemas/thread';
@@ -18,6 +18,12 @@ import { useTargets } from './use-targets';
 
 const headHeight = 68;
 const formKey = 'form';
+
+/** True for a press on an entry's own ground: not on something with an act of its own, and not the end of marking words. */
+function pressedPlainly(event: MouseEvent<HTMLElement>): boolean {
+  const own = event.target instanceof Element && event.target.closest('a, button, input, textarea, select, label, summary');
+  return !own && (window.getSelection()?.isCollapsed ?? true);
+}
 
 export interface MarginProps {
   readonly entries: readonly MarginEntry[];
@@ -133,8 +139,9 @@ export function Margin({ entries, geometry, plan, shownVolts, checked, selected,
                   ref={refOf(entry.key)}
                   style={style}
                   data-folded={common.folded ? '' : undefined}
+                  onClick={(event) => { if (entry.key !== selected && pressedPlainly(event)) onSelect(entry.key); }}
                   className={classNames(
-                    'pl-3 text-sm leading-[1.34] max-wide:mb-1 max-tablet:mb-0 max-tablet:border-b max-tablet:border-rule max-tablet:pr-3.5 max-tablet:pl-3.5 max-tablet:text-body',
+                    'cursor-default pl-3 text-sm leading-[1.34] max-wide:mb-1 max-tablet:mb-0 max-tablet:border-b max-tablet:border-rule max-tablet:pr-3.5 max-tablet:pl-3.5 max-tablet:text-body',
                     tied && 'absolute inset-x-0',
                     entry.key === selected && 'bg-film-2 pb-2 outline-2 -outline-offset-1 outline-act max-tablet:border-l-4 max-tablet:border-l-act max-tablet:outline-none',
                   )}

@@ -1,7 +1,10 @@
-/** What a margin entry is tied to. Parts by record id or by designator, nets by name, spots in sheet units. */
+/**
+ * What a margin entry is tied to. Parts by record id or by designator, nets by name, spots in sheet units. A designator with
+ * `on` is tied to that net beside the transistor among `on.refs`, where there is one: a floating gate is shown at the gate.
+ */
 export type MarginAnchor =
   | { readonly kind: 'part'; readonly id: string }
-  | { readonly kind: 'ref'; readonly ref: string }
+  | { readonly kind: 'ref'; readonly ref: string; readonly on?: { readonly net: string; readonly refs: readonly string[] } }
   | { readonly kind: 'net'; readonly name: string }
   | { readonly kind: 'spot'; readonly x: number; readonly y: number };
 
@@ -16,6 +19,11 @@ export interface Box {
   readonly top: number;
   readonly right: number;
   readonly bottom: number;
+}
+
+export interface Obstacles {
+  readonly symbols: readonly Box[];
+  readonly levelWires: readonly Box[];
 }
 
 export interface SheetTarget {
@@ -36,6 +44,8 @@ export interface SheetGeometry {
   targetOf(anchor: MarginAnchor): SheetTarget | null;
   /** Boxes of texts that a leader must not cross. */
   texts(): readonly Box[];
+  /** Boxes that a leader had better leave alone: symbols, and the room along level wires. */
+  obstacles(): Obstacles;
   /** Visible size of the canvas. */
   size(): { readonly width: number; readonly height: number };
   /** Called after each frame that moved something: pan, zoom, drag, edit, resize. Returns how to stop. */

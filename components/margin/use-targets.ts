@@ -1,16 +1,17 @@
 'use client';
 import { useEffect, useState } from 'react';
 import type { MarginEntry } from './margin-entry';
-import type { Box, MarginAnchor, SheetGeometry, SheetTarget } from './sheet-geometry';
+import type { Box, MarginAnchor, Obstacles, SheetGeometry, SheetTarget } from './sheet-geometry';
 
 export interface Targets {
   readonly of: ReadonlyMap<string, SheetTarget>;
   readonly texts: readonly Box[];
+  readonly obstacles: Obstacles;
   readonly width: number;
   readonly height: number;
 }
 
-const none: Targets = { of: new Map(), texts: [], width: 0, height: 0 };
+const none: Targets = { of: new Map(), texts: [], obstacles: { symbols: [], levelWires: [] }, width: 0, height: 0 };
 
 function read(geometry: SheetGeometry, wanted: readonly { readonly key: string; readonly anchor: MarginAnchor | null }[]): Targets {
   const of = new Map<string, SheetTarget>();
@@ -18,7 +19,7 @@ function read(geometry: SheetGeometry, wanted: readonly { readonly key: string; 
     const target = anchor === null ? null : geometry.targetOf(anchor);
     if (target) of.set(key, target);
   }
-  return { of, texts: geometry.texts(), ...geometry.size() };
+  return { of, texts: geometry.texts(), obstacles: geometry.obstacles(), ...geometry.size() };
 }
 
 /** Where entries' targets are on the screen, read again after each frame that moved something. */
