@@ -151,6 +151,11 @@ export class Editor {
     this.tool.cancel();
   }
 
+  /** Says something about what was tried on the sheet; it stands until the next command. */
+  say(message: string): void {
+    this.update({ message });
+  }
+
   /** Forgets undo: the document was built anew after a refused edit. */
   forgetHistory(): void {
     this.history.clear();

@@ -44,7 +44,12 @@ export function useCanvasKeys(editor: Editor) {
     onPaste(event: ClipboardEvent) {
       if (typing(event.target)) return;
       event.preventDefault();
-      const clip = parseClip(event.clipboardData.getData('text/plain'));
+      const text = event.clipboardData.getData('text/plain');
+      const clip = parseClip(text);
+      if (clip === null && text.trim() !== '') {
+        editor.say('What is on the clipboard is no part of a sheet. Copy parts here or on another sheet first.');
+        return;
+      }
       const same = clip && editor.clipboard && JSON.stringify(clip.parts.map((part) => part.id)) === JSON.stringify(editor.clipboard.parts.map((part) => part.id));
       editor.run('paste', clip && !same ? { clip } : undefined);
     },

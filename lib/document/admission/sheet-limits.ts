@@ -5,6 +5,9 @@ export const recordLimits: Readonly<Record<CollectionName, number>> = {
   parts: 12_000, wires: 16_000, junctions: 16_000, scenarios: 60, holdPoints: 60,
 };
 
+/** Parts with a designator on one sheet: what a deck may bring, and a page can check while it is drawn on. */
+export const partsLimit = 1_000;
+
 /** Model cards and subcircuits of one sheet's library. */
 export const libraryLimit = 1_000;
 

@@ -1,3 +1,4 @@
+import { partsLimit } from '@/lib/document/admission/sheet-limits';
 import { gridUnit } from '@/lib/document/records';
 import { pasteClip, type Clip } from '../edits/clip';
 import { always, type Command } from './command';
@@ -9,6 +10,8 @@ export const paste: Command<{ readonly clip?: Clip } | void> = {
   perform: ({ state, clip: kept, newId }, args) => {
     const clip = args?.clip ?? kept;
     if (!clip) return { refused: 'There is nothing to paste. Copy a part first.' };
+    const parts = [...state.sheet.parts, ...clip.parts].filter((part) => part.ref !== '').length;
+    if (parts > partsLimit) return { refused: `With what is pasted the sheet would have ${parts} parts; it takes ${partsLimit}. Paste less, or on a sheet of its own.` };
     const { sheet, pasted } = pasteClip(state.sheet, clip, 2 * gridUnit, 2 * gridUnit, newId);
     const shifted: Clip = {
       ...clip,

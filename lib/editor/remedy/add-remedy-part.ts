@@ -10,6 +10,7 @@ import type { PartRecord, Sheet } from '@/lib/document/records';
 import { newPart } from '../edits/add-part';
 import type { NewId } from '../edits/edit';
 import { joinToNet } from './join-to-net';
+import { hangPlace } from './hang-place';
 import { drawnNetsNamed, nameOfHeld, type HeldNet } from './named-net';
 
 type AddPart = Extract<RemedyEdit, { edit: 'add part' }>;
@@ -47,21 +48,31 @@ function wireBoxes(sheet: Sheet): readonly Box[] {
   });
 }
 
-/** Where a two-pin part would stand best: hanging from the pin it serves when it leads to 0 V, beside both pins otherwise. */
-function poseFor(sheet: Sheet, part: PartRecord, pins: Readonly<Record<string, string>>): PartRecord {
+/** Contacts come off with the lead: a part hangs from the other pins of a net first. */
+const fixedFirst = (sheet: Sheet, pins: readonly PinPlace[]): readonly PinPlace[] => {
+  const loose = new Set(sheet.parts.filter((part) => part.kind === 'plug-contact' || part.kind === 'removable-lead').map((part) => part.id));
+  return [...pins.filter((pin) => !loose.has(pin.part)), ...pins.filter((pin) => loose.has(pin.part))];
+};
+
+/** Where a two-pin part stands best: hanging from the pin it serves when it leads to 0 V, beside both pins otherwise; in either case free of others. */
+function placeFor(sheet: Sheet, part: PartRecord, pins: Readonly<Record<string, string>>): PartRecord {
+  const wires = wireBoxes(sheet);
   const names = pinPlacesOf(part).map((pin) => pin.pin);
   const [one, two] = [...names].sort((a, b) => Number(pins[a] === '0') - Number(pins[b] === '0'));
   const live = anchorsOf(sheet, pins[one ?? ''] ?? '');
   const pair = nearestPair(live, anchorsOf(sheet, pins[two ?? ''] ?? ''));
   const toZero = two !== undefined && pins[two] === '0';
   const anchor = toZero ? live[0] : pair?.[0] ?? live[0];
-  if (!anchor || one === undefined) return part;
+  const free = (record: PartRecord) => freePlace(record, [...sheet.parts.map(partBoxOf), ...wires], 15);
+  if (!anchor || one === undefined) return free(part);
   const upper = !toZero && pair && pair[1].y < pair[0].y && two !== undefined ? two : one;
   const turned = names.length === 2 ? { ...part, turn: turnedFor(part, upper, 'top') } : part;
   const top = pinPlaceOf({ ...turned, x: 0, y: 0 }, upper) ?? { x: 0, y: 0 };
+  const hung = toZero ? hangPlace(sheet, turned, top, fixedFirst(sheet, live), wires) : null;
+  if (hung) return hung;
   const at: Point = toZero || !pair ? { x: anchor.x - 30, y: anchor.y + 20 - top.y }
     : { x: snap((pair[0].x + pair[1].x) / 2) - 60, y: snap((pair[0].y + pair[1].y) / 2) };
-  return { ...turned, x: at.x - top.x, y: at.y };
+  return free({ ...turned, x: at.x - top.x, y: at.y });
 }
 
 /** Adds the part of a proposed change near the pins it serves and joins it to its nets. Words when it cannot. */
@@ -75,8 +86,7 @@ export function addRemedyPart(
   const gone = Object.values(edit.pins).find((net) => !nets.has(net));
   if (gone !== undefined) return { refused: `The sheet no longer has a net ${gone}. The change was proposed for an older state.` };
   const now = Object.fromEntries(Object.entries(edit.pins).map(([pin, net]) => [pin, nameOfHeld(sheet, nets.get(net) as HeldNet) ?? net]));
-  const outlines = [...sheet.parts.map(partBoxOf), ...wireBoxes(sheet)];
-  const placed = freePlace(poseFor(sheet, bare, now), outlines, 15);
+  const placed = placeFor(sheet, bare, now);
   const joins = Object.entries(edit.pins).sort(([, a], [, b]) => Number(a === '0') - Number(b === '0'));
   let current: Sheet = { ...sheet, parts: [...sheet.parts, placed] };
   for (const [pin, net] of joins) current = joinToNet(current, { part: placed.id, pin }, nets.get(net) as HeldNet, newId);

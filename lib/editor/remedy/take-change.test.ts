@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { RemedyEdit } from '@/lib/netlist/findings/finding';
 import { partBoxOf, pinPlacesOf } from '@/lib/document/geometry/pin-place';
-import { boxesOverlap } from '@/lib/document/geometry/point';
+import { boxesOverlap, growBox } from '@/lib/document/geometry/point';
 import { gateStage } from '@/lib/document/testing/gate-stage';
 import { placeNetlist } from '@/lib/document/place/place-netlist';
 import { netlistOf } from '@/lib/document/testing/netlist-builder';
@@ -36,6 +36,19 @@ describe('taking a proposed change', () => {
     expect(resistor.facts.value).toBe(22_000);
     expect(overlaps(test)).toEqual([]);
     expect(test.press('Mod+Z').hashes).toEqual(before);
+  });
+
+  it('hangs a pull-down straight from a pin on the gate\'s side, its 0 V below, apart from others and their words', () => {
+    const test = floating();
+    take(test, { edit: 'add part', kind: 'resistor', facts: { value: 22_000 }, pins: { 1: 'GATE', 2: '0' } });
+    const top = test.at('R1:1');
+    const wire = test.sheet.wires.find((one) => [one.a, one.b].some((end) => end.at === 'pin' && end.part === test.part('R1').id));
+    expect(wire?.bends).toEqual([]);
+    const zero = test.sheet.parts.find((part) => part.kind === 'zero-volt' && part.x === test.at('R1:2').x && part.y === test.at('R1:2').y);
+    expect(zero?.turn).toBe(0);
+    expect(top.x).toBe(test.at('R1:2').x);
+    const near = test.sheet.parts.filter((part) => part !== zero && part.ref !== 'R1').map((part) => growBox(partBoxOf(part), 4));
+    expect(near.filter((box) => boxesOverlap(box, partBoxOf(test.part('R1'))))).toEqual([]);
   });
 
   it('puts a diode across a coil, stripe to the supply', () => {
