@@ -3,6 +3,8 @@ import type { SheetSnapshot } from '@/realtime/client/sheet-session';
 import { Moment } from '@/components/ui/moment';
 import type { Lamp } from '@/components/shell/status-strip';
 
+const edits = (count: number): string => `${count} ${count === 1 ? 'edit' : 'edits'}`;
+
 /** The save mark in words. It says 'saved' only of what the server has committed. */
 export function SaveWords({ snapshot }: { readonly snapshot: SheetSnapshot | null }) {
   if (!snapshot) return <>Opening</>;
@@ -10,8 +12,10 @@ export function SaveWords({ snapshot }: { readonly snapshot: SheetSnapshot | nul
   if (!loaded) return line.state === 'ended' ? <b className="font-medium text-stop-ink">{line.why}</b> : <>Loading the sheet</>;
   switch (save.state) {
     case 'saved': return line.state === 'open' ? save.at === null ? <>Saved</> : <>Saved <Moment at={new Date(save.at).toISOString()} /></> : <span className="text-caution-ink">Not connected: {line.why}</span>;
-    case 'saving': return <>Saving, {save.edits} {save.edits === 1 ? 'edit' : 'edits'}</>;
-    case 'not saved': return <b className="font-medium text-caution-ink">Not saved: {save.edits} {save.edits === 1 ? 'edit' : 'edits'} kept here. {save.why}</b>;
+    case 'saving': return <>Saving, {edits(save.edits)}</>;
+    case 'not saved': return line.state === 'open'
+      ? <b className="font-medium text-caution-ink">Not saved: {edits(save.edits)} kept here. {save.why}</b>
+      : <><b className="font-medium text-caution-ink">Not saved: offline, kept here</b><span title={line.why}>{edits(save.edits)}, sent when the line is back</span></>;
   }
 }
 
@@ -26,5 +30,5 @@ export function saveLamp(snapshot: SheetSnapshot | null): Lamp {
 /** Why a cut must wait: only what is committed can be cut. */
 export function unsavedWords(snapshot: SheetSnapshot | null): string | null {
   if (!snapshot || !snapshot.loaded) return 'the sheet is loading';
-  return snapshot.save.state === 'saved' ? null : `${snapshot.save.edits} ${snapshot.save.edits === 1 ? 'edit' : 'edits'} not saved yet`;
+  return snapshot.save.state === 'saved' ? null : `${edits(snapshot.save.edits)} not saved yet`;
 }

@@ -75,6 +75,7 @@ export interface SheetSessionOptions {
 }
 
 const presencePause = 100;
+const offlineWords = 'This browser is offline.';
 
 /** `openSheetSession` in `open-sheet-session.ts` makes one with the browser's own storage; tests bring theirs. */
 export class RoomSession implements SheetSession {
@@ -244,7 +245,8 @@ export class RoomSession implements SheetSession {
   private view(doc: Doc): SheetSnapshot {
     const { copy, next } = this;
     const live = next ?? copy;
-    const offline = live ? live.offline : 'Connecting.';
+    // A line without a network stays open for a while and says nothing; the browser knows at once.
+    const offline = globalThis.navigator?.onLine === false ? offlineWords : live ? live.offline : 'Connecting.';
     const waiting = (copy?.outbox.waiting.length ?? 0) + (next && next !== copy ? next.outbox.waiting.length : 0);
     const everyone = [...this.people.values()];
     return {
