@@ -18,7 +18,7 @@ export function PlainPage({ code, title, children, actions }: PlainPageProps) {
       <TopBar><ThemeToggle /></TopBar>
       <main className="flex flex-1 flex-col bg-film text-ink">
         <SheetFrame columns={8} rows={5}>
-          <div className="mt-auto -mr-px -mb-px w-[522px] self-end border-[1.5px] border-ink bg-film max-tablet:mt-0 max-tablet:w-full">
+          <div className="mt-auto -mr-px -mb-px w-[522px] self-end border-[1.5px] border-ink bg-film max-tablet:mx-0 max-tablet:mt-0 max-tablet:w-full max-tablet:border-x-0">
             <div className="px-5 pt-[22px] pb-[18px]">
               <h1 className="font-cond text-[38px] leading-[1.05] font-semibold tracking-[.01em]">{title}</h1>
               <div className="mt-2 text-body text-ink-2">{children}</div>
