@@ -5,10 +5,12 @@ import type { Person } from '@/lib/access/caller';
 import type { BenchAccess } from '@/lib/access/gates';
 import type { Circuit } from '@/lib/schemas/circuit';
 import type { Page, PageQuery } from '@/lib/schemas/page';
+import { idSchema } from '@/lib/schemas/text';
 import { circuitViews } from './circuit-view';
 import { decodeCursor, encodeCursor } from './cursor';
 
-const place = z.tuple([z.number(), z.string()]);
+/** When the last one shown was changed, in ms of the Unix epoch up to the year 9999, and its id. */
+const place = z.tuple([z.int().min(0).max(253_402_300_799_999), idSchema]);
 
 /** A page of a bench's circuits, last changed first. */
 export async function listBenchCircuits(db: Database, access: BenchAccess, person: Person, query: PageQuery & { archived?: 'yes' | undefined }): Promise<Page<Circuit>> {

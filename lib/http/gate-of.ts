@@ -1,3 +1,4 @@
+import type { z } from 'zod';
 import type { Database } from '@/db/client';
 import type { Caller, Person } from '@/lib/access/caller';
 import {
@@ -6,6 +7,8 @@ import {
 } from '@/lib/access/gates';
 import type { Standing } from '@/lib/access/may';
 import { Problem } from '@/lib/errors/problem';
+import { slugSchema } from '@/lib/schemas/bench';
+import { idSchema } from '@/lib/schemas/text';
 import type { Target } from './operation';
 
 /** What a handler gets, by what its path names. */
@@ -22,7 +25,14 @@ export interface AccessByTarget {
 
 type Gate<T extends Target> = (db: Database, caller: Caller, params: Readonly<Record<string, string>>) => Promise<AccessByTarget[T]>;
 
-const idOf = (params: Readonly<Record<string, string>>): string => params['id'] ?? '';
+/** What cannot be the name of anything is not there: it never reaches the database, whose columns take ids only. */
+function named(schema: z.ZodType<string>, name: string | undefined): string {
+  const parsed = schema.safeParse(name);
+  if (!parsed.success) throw new Problem('not-found');
+  return parsed.data;
+}
+
+const idOf = (params: Readonly<Record<string, string>>): string => named(idSchema, params['id']);
 
 function personOf(caller: Caller): Caller & { person: Person } {
   if (caller.person === null) throw new Problem('not-signed-in');
@@ -31,7 +41,7 @@ function personOf(caller: Caller): Caller & { person: Person } {
 
 const gates: { readonly [T in Target]: Gate<T> } = {
   none: async () => null,
-  bench: (db, caller, params) => benchGate(db, personOf(caller), params['bench'] ?? ''),
+  bench: (db, caller, params) => benchGate(db, personOf(caller), named(slugSchema, params['bench'])),
   circuit: (db, caller, params) => circuitGate(db, caller, idOf(params)),
   revision: (db, caller, params) => revisionGate(db, caller, idOf(params)),
   'sign-off': (db, caller, params) => signOffGate(db, caller, idOf(params)),

@@ -33,12 +33,23 @@ async function readLimited(request: Request, limit: number): Promise<Uint8Array>
   return Buffer.concat(chunks, size);
 }
 
+/** Half of a character that takes two (`\ud800` in JSON): no text has it, and no database column keeps it. */
+const halfCharacter = /\p{Surrogate}/u;
+
 function parseJson(bytes: Uint8Array): unknown {
+  let halved = false;
+  const look = (key: string, value: unknown): unknown => {
+    halved ||= halfCharacter.test(key) || (typeof value === 'string' && halfCharacter.test(value));
+    return value;
+  };
+  let parsed: unknown;
   try {
-    return JSON.parse(new TextDecoder('utf-8', { fatal: true }).decode(bytes));
+    parsed = JSON.parse(new TextDecoder('utf-8', { fatal: true }).decode(bytes), look);
   } catch {
     throw new Problem('input-wrong', 'The body is not JSON in UTF-8.');
   }
+  if (halved) throw new Problem('input-wrong', 'The body holds half a character.');
+  return parsed;
 }
 
 /** `value` as `schema` has it, or 422 with every wrong field. */

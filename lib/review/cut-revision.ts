@@ -33,8 +33,10 @@ export async function cutRevision(act: Act, access: CircuitAccess, input: Cut): 
   if (access.archived) throw new Problem('archived');
   const live = await readLiveSheet(act.db, access.circuit);
   const earlier = await revisionAtSeq(act.db, access.circuit, input.seq ?? live.seq);
-  if (earlier) return repeat(earlier.id);
-  if (input.seq !== undefined && input.seq !== live.seq) {
+  const moved = input.seq !== undefined && input.seq !== live.seq;
+  // The very same cut sent again has its answer, also when the sheet has moved on since.
+  if (earlier && (!moved || (earlier.cutBy === act.person.id && earlier.note === input.note))) return repeat(earlier.id);
+  if (moved) {
     throw new Problem('sheet-moved', `You looked at change ${input.seq}; the sheet is at change ${live.seq}.`);
   }
   const netlist = sheetToNetlist(live.sheet, await circuitTitle(act.db, access.circuit) ?? live.sheet.title);

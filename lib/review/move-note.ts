@@ -1,5 +1,6 @@
 import { inTransaction } from '@/db/transaction';
 import { writeAudit } from '@/db/mutations/audit';
+import { lockCircuit } from '@/db/mutations/circuits';
 import { lockThread, setThreadStatus } from '@/db/mutations/threads';
 import { contributesTo } from '@/db/queries/standing';
 import type { ThreadAccess } from '@/lib/access/gates';
@@ -7,7 +8,7 @@ import type { Action } from '@/lib/access/rights';
 import { stillMay } from '@/lib/access/still-may';
 import { Problem } from '@/lib/errors/problem';
 import type { ThreadPatch, ThreadState } from '@/lib/schemas/thread';
-import { entry, type Act } from './act';
+import { entry, refuseArchived, type Act } from './act';
 import { addMessage } from './write-note';
 
 /** Where a note may go from where it is. A resolved one is opened again before anything else. */
@@ -24,6 +25,7 @@ function actionFor(status: ThreadState, mustAnswer: boolean): Action {
 /** Moves a note on: a maker says it is answered, its author or whoever the table of rights names resolves it, anyone opens it again. */
 export async function moveNote(act: Act, access: ThreadAccess, { status, body }: ThreadPatch): Promise<void> {
   await inTransaction(act.db, async (tx) => {
+    refuseArchived(await lockCircuit(tx, access.circuit));
     const row = await lockThread(tx, access.thread);
     if (!row) throw new Problem('not-found');
     await stillMay(tx, act.person.id, [actionFor(status, row.mustAnswer)], {

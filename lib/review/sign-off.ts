@@ -32,9 +32,10 @@ export async function signOff(act: Act, access: RevisionAccess, input: NewSignOf
 
     const earlier = standingAt(picture, access.revision, point.name);
     if (earlier?.by === act.person.id && input.contentHash === revision.contentHash) return repeat(earlier.id);
-    if (revision.askedAt === null || stateOf(picture, revision) === 'withdrawn') throw new Problem('not-in-review');
-
     const requirements = requirementsOf({ ...facts, hashMatches: input.contentHash === revision.contentHash });
+    const closed = stateOf(picture, revision) === 'withdrawn' && facts.newerAsked === null;
+    if (revision.askedAt === null || closed) throw new Problem('not-in-review', undefined, { requirements, refs: [] });
+
     refuseUnmet(firstUnmet(requirements, point.name), requirements);
     refuseCovered(picture, access.revision, facts.holdPoints, point);
 

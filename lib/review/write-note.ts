@@ -3,6 +3,7 @@ import type { MessageId, ThreadId } from '@/db/authorized';
 import type { Transaction } from '@/db/client';
 import { inTransaction } from '@/db/transaction';
 import { writeAudit } from '@/db/mutations/audit';
+import { lockCircuit } from '@/db/mutations/circuits';
 import { insertMessage, insertThread, lockThread, rewriteMessage } from '@/db/mutations/threads';
 import { newestRevisionId } from '@/db/queries/threads';
 import type { CircuitAccess, MessageAccess, ThreadAccess } from '@/lib/access/gates';
@@ -10,12 +11,13 @@ import { mintMessage, mintThread } from '@/lib/access/mint';
 import { stillMay } from '@/lib/access/still-may';
 import { Problem } from '@/lib/errors/problem';
 import type { NewThread } from '@/lib/schemas/thread';
-import { entry, type Act } from './act';
+import { entry, refuseArchived, type Act } from './act';
 
 /** Opens a margin note. It remembers the newest revision at that moment. */
 export async function openNote(act: Act, access: CircuitAccess, input: NewThread): Promise<ThreadId> {
   const id = mintThread(ulid(act.now.getTime()));
   await inTransaction(act.db, async (tx) => {
+    refuseArchived(await lockCircuit(tx, access.circuit));
     await stillMay(tx, act.person.id, ['write notes'], access);
     await insertThread(tx, {
       id, circuitId: access.circuit, anchor: input.anchor, mustAnswer: input.mustAnswer, status: 'open',
@@ -29,6 +31,7 @@ export async function openNote(act: Act, access: CircuitAccess, input: NewThread
 
 export async function reply(act: Act, access: ThreadAccess, body: string): Promise<MessageId> {
   return inTransaction(act.db, async (tx) => {
+    refuseArchived(await lockCircuit(tx, access.circuit));
     await stillMay(tx, act.person.id, ['write notes'], access);
     if (!await lockThread(tx, access.thread)) throw new Problem('not-found');
     const id = await addMessage(tx, act, access.thread, body);
@@ -39,6 +42,7 @@ export async function reply(act: Act, access: ThreadAccess, body: string): Promi
 
 export async function rewrite(act: Act, access: MessageAccess, body: string): Promise<void> {
   await inTransaction(act.db, async (tx) => {
+    refuseArchived(await lockCircuit(tx, access.circuit));
     await stillMay(tx, act.person.id, ['edit own message'], { ...access, author: access.standing.author });
     await rewriteMessage(tx, access.message, body, act.now);
     await writeAudit(tx, entry(act, access, 'edited a message', { thread: access.thread, message: access.message }));

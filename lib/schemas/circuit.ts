@@ -50,5 +50,5 @@ export type CircuitPatch = z.infer<typeof circuitPatchSchema>;
 export const deckInputSchema = z.strictObject({ deck: deckSchema });
 export const makersSchema = z.strictObject({ makers: z.array(idSchema).max(50, 'At most 50 makers.') });
 
-export const checkScopeSchema = z.object({ scenario: z.string().max(120).optional(), outcomes: z.literal('all').optional() });
+export const checkScopeSchema = z.object({ scenario: z.string().optional(), outcomes: z.literal('all').optional() });
 export type CheckScope = z.infer<typeof checkScopeSchema>;

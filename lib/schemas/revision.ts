@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { holdPointSchema } from './hold-point';
-import { idSchema, personRefSchema } from './text';
+import { idSchema, personRefSchema, plainText } from './text';
 
 export const revisionStates = ['cut', 'in review', 'changes asked', 'signed off', 'superseded', 'withdrawn'] as const;
 export type RevisionState = (typeof revisionStates)[number];
@@ -67,7 +67,7 @@ export const revisionSchema = z.object({
 export type Revision = z.infer<typeof revisionSchema>;
 
 export const cutSchema = z.strictObject({
-  note: z.string().trim().max(2_000, 'Keep it to 2,000 characters.').default(''),
+  note: plainText(2_000).default(''),
   seq: z.number().int().nonnegative().optional(),
 });
 export type Cut = z.infer<typeof cutSchema>;
@@ -77,12 +77,12 @@ export const askSchema = z.strictObject({
 });
 export type Ask = z.infer<typeof askSchema>;
 
-const reasonSchema = z.string().trim().min(1, 'Give the reason.').max(2_000, 'Keep it to 2,000 characters.');
+const reasonSchema = plainText(2_000).min(1, 'Give the reason.');
 
 export const newSignOffSchema = z.strictObject({
   holdPoint: z.string().trim().min(1).max(120),
   contentHash: z.string().min(1).max(128),
-  conditions: z.string().trim().max(4_000, 'Keep it to 4,000 characters.').optional(),
+  conditions: plainText(4_000).optional(),
   /** A date (its end, UTC) or a moment. */
   until: z.union([z.iso.date(), z.iso.datetime({ offset: true })]).optional(),
 });

@@ -25,4 +25,4 @@ export const ownSessionSchema = z.object({
 export type OwnSession = z.infer<typeof ownSessionSchema>;
 
 /** Ends one session, or every other one when `id` is left out. */
-export const endSessionsSchema = z.strictObject({ id: z.string().max(64).optional() });
+export const endSessionsSchema = z.strictObject({ id: z.string().regex(/^[0-9a-f]{64}$/, 'This is not the id of a session.').optional() });

@@ -53,6 +53,13 @@ describe('cutting', () => {
     expect(await cut(here.maker, { seq: seq + 1 })).toMatchObject({ status: 201, body: { seq: seq + 1 } });
   });
 
+  it('refuses a new cut at an older seq, also where one was cut there; the very same cut sent again has its answer', async () => {
+    const first = await cut(here.maker, { note: 'proof stage' });
+    await changeValue(world, here.maker, here.circuit, 1_800);
+    expect(await cut(here.maker, { seq: first.body.seq, note: 'second' })).toMatchObject({ status: 409, body: { code: 'sheet-moved' } });
+    expect(await cut(here.maker, { seq: first.body.seq, note: 'proof stage' })).toMatchObject({ status: 200, body: { id: first.body.id } });
+  });
+
   it('settles two cuts at once: one revision, one answer', async () => {
     const answers = await Promise.all([cut(), cut()]);
     expect(new Set(answers.map(({ body }) => body.id)).size).toBe(1);
