@@ -1,4 +1,5 @@
 import type { Net, Netlist, NetlistPart } from '../netlist';
+import { withCardFacts } from './card-facts';
 import { findControllerPins, type ControllerPin } from './controller-pins';
 import { buildGraph, type Graph } from './graph';
 import { findLeads, type LeadGroup } from './leads';
@@ -33,7 +34,8 @@ export interface Circuit {
   net(name: string): Net | undefined;
 }
 
-export function buildCircuit(netlist: Netlist): Circuit {
+export function buildCircuit(drawn: Netlist): Circuit {
+  const netlist = withCardFacts(drawn);
   const graph = buildGraph(netlist.parts);
   const rails = findRails(graph);
   const sources = findSources(graph, netlist.parts, rails);

@@ -23,6 +23,7 @@ export const cases: readonly RuleCase[] = [
   { name: 'a P-channel part pulled down to 0 V', deck: deck('V1 vbus 0 12\n*@V1 role=supply\nRL drain 0 24\n*@RL load=heater', pFet(facts('-3', '-10')), resistor('R2', 'gate', 'vbus', '10k'), resistor('R3', 'gate', 'drv', '10'), control('12')), expect: { outcome: 'pass' } },
   { name: 'no threshold maximum', deck: stage('10', facts('', '10')), expect: { outcome: 'undetermined', says: 'V_GS(th) maximum' } },
   { name: 'a typical threshold can fail it', deck: stage('2.4', facts('', '10')), expect: { outcome: 'fail', severity: 'stop' } },
+  { name: 'the VTO of its card counts as typical', deck: deck(heaterStage(), nFet('vds_max=100 vgs_max=20 rds_on=40m rds_on_spec_vgs=10'), resistor('R3', 'drv', 'gate', '10'), resistor('R2', 'drv', '0', '1meg'), control('3.4', 'role=pin'), '.model NM NMOS(VTO=3 KP=20)'), expect: { outcome: 'fail', severity: 'stop' } },
   { name: 'no V_GS for R_DS(on)', deck: stage('10', facts('4', '')), expect: { outcome: 'undetermined', says: 'rds_on_spec_vgs' } },
   undriven,
   { name: 'never driven on', deck: deck(heaterStage(), nFet(facts('3', '10'), '0')), expect: { outcome: 'not applicable' } },

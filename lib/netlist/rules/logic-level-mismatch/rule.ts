@@ -9,6 +9,7 @@ import type { Station } from '../../points/station';
 import type { Outcome, Rule, RuleInput } from '../rule';
 import { ampsInto } from '../support/led-current';
 import { atPoint, atStation, everywhere } from '../support/outcome';
+import { refusalWords } from '../support/stress';
 import { pointWords, placeWords, say } from '../support/words';
 
 const parameters = {
@@ -89,7 +90,7 @@ function stageOutcomes(input: Input, stage: Stage): readonly Outcome[] {
   const base = { severity: 'stop' as Severity, target: { transistor: [transistor.id] }, refs: [transistor.ref, ...(stage.control ? [stage.control.part.ref] : [])], nets: [terminals.control] };
   return input.points.stations.map((station) => {
     const on = strongest(input, stage, station);
-    if (!on) return atStation(station, { ...base, outcome: 'undetermined', message: `${transistor.ref}: no gate voltage computed`, evidence: [], missing: 'operating point' });
+    if (!on) return atStation(station, { ...base, outcome: 'undetermined', message: `${transistor.ref}: no gate voltage computed: ${refusalWords(input.points, station)}`, evidence: [], missing: refusalWords(input.points, station) });
     if (on.volts < input.parameters.drivenVolts) {
       if (!stage.control) return everywhere({ ...base, outcome: 'not applicable', holdPoint: station.holdPoint, message: `${transistor.ref} is never driven on`, evidence: [] });
       const { ref } = stage.control.part;
