@@ -22,6 +22,7 @@ export const cases: readonly RuleCase[] = [
   { name: '20 V AC on a 50 V part', deck: bridge('vmax=50'), expect: { outcome: 'pass' } },
   { name: 'an AC rating: stop above it', deck: deck('V1 l 0 SIN(0 325.27 50)\n*@V1 rms=230', 'C1 l 0 100n\n*@C1 vmax_ac=250', 'R1 l 0 1meg'), expect: { outcome: 'fail', severity: 'stop' } },
   { name: 'an AC rating: nothing below it', deck: deck('V1 l 0 SIN(0 325.27 50)\n*@V1 rms=230', 'C1 l 0 100n\n*@C1 vmax_ac=310', 'R1 l 0 1meg'), expect: { outcome: 'pass' } },
+  { name: 'behind a capacitor', deck: deck('V1 l 0 SIN(0 33.9 50)\n*@V1 rms=24', 'C9 l a 1u\n*@C9 vmax=100', 'D1 a p DX', 'D2 0 a DX', 'C1 p 0 100u\n*@C1 vmax=25', 'R1 p 0 10k'), expect: { outcome: 'undetermined', says: 'needs transient' } },
   { name: 'no rating', deck: across('12', 'esr=0.1'), expect: { outcome: 'undetermined', says: 'voltage rating' } },
   { name: 'fed by the mains: margin-at-mains speaks', deck: deck('V1 vbus 0 325\n*@V1 role=mains', 'C1 vbus 0 100u\n*@C1 vmax=250', 'R1 vbus 0 100k'), expect: { outcome: 'none' } },
   withParameter(close, 'cautionShare', 0.95, { outcome: 'pass' }),

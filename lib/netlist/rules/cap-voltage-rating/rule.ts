@@ -7,6 +7,7 @@ import { nearestUp } from '../../series/preferred-values';
 import type { Outcome, Rule, RuleInput } from '../rule';
 import { voltsAcross } from '../support/alternating';
 import { isMainsFed } from '../support/mains';
+import { needsTransient, needsTransientOutcome } from '../support/needs-transient';
 import { atPoint, atStation, missingFact } from '../support/outcome';
 import { ratingOf } from '../support/rating';
 import { crossingEvidence, crossingVolts, judgeStress, refusalWords, stressEvidence, type Measure, type StressLimit } from '../support/stress';
@@ -43,6 +44,7 @@ function capacitorOutcomes(input: Input, part: NetlistPart): readonly Outcome[] 
   const base = { severity: 'stop', target: { capacitor: [part.id] }, refs: [part.ref], nets: [...(endNets(part) ?? [])] } as const;
   const limits = limitsOf(input, part);
   if (!limits) return [missingFact(part, 'vmax', 'voltage rating', base)];
+  if (needsTransient(input.circuit, part)) return [needsTransientOutcome(part, 'volts', base)];
   const factor = noLoad(input, part);
   const measure: Measure = (point) => {
     const volts = voltsAcross(point, part);

@@ -27,6 +27,7 @@ export const cases: readonly RuleCase[] = [
   { name: 'with room for π times its supply', deck: oscillator('24', 200), expect: { outcome: 'pass' } },
   { name: 'no V_DS maximum', deck: deck('V1 vbus 0 12\n*@V1 role=supply\nRL vbus drain 24\n*@RL load=heater', nFet('vgs_max=20 vth_min=2 vth_max=4 rds_on=40m'), drive), expect: { outcome: 'undetermined', says: 'V_DS maximum' } },
   { name: 'fed by the mains: margin-at-mains speaks', deck: switching('325', 400).replace('role=supply', 'role=mains'), expect: { outcome: 'none' } },
+  { name: 'a diode fed through a capacitor', deck: 'V1 l 0 SIN(0 33.9 50)\n*@V1 rms=24\nC1 l a 1u\nD1 0 a DX\n*@D1 vr_max=50\nR1 a 0 10k', expect: { outcome: 'undetermined', says: 'needs transient' } },
   { name: 'no switch and no diode', deck: 'V1 vbus 0 60\nR1 vbus 0 1k', expect: { outcome: 'none' } },
   withParameter(close, 'cautionShare', 0.9, { outcome: 'pass' }),
 ];

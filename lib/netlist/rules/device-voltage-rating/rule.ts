@@ -1,6 +1,7 @@
 import type { Outcome, Rule, RuleInput } from '../rule';
 import { blockingParts, type Blocking } from '../support/device-stress';
 import { isMainsFed } from '../support/mains';
+import { needsTransient, needsTransientOutcome } from '../support/needs-transient';
 import { atPoint, atStation, missingFact } from '../support/outcome';
 import { ratingOf } from '../support/rating';
 import { crossingEvidence, crossingVolts, judgeStress, refusalWords, stressEvidence } from '../support/stress';
@@ -10,11 +11,12 @@ const parameters = {
   cautionShare: { value: 0.8, unit: '', words: 'share of the rating that a switch or diode may block in normal use', source: 'ECSS-Q-ST-30-11C V_DS 80 %, from memory' },
 } as const;
 
-function deviceOutcomes({ points, parameters: { cautionShare } }: RuleInput<typeof parameters>, device: Blocking): readonly Outcome[] {
+function deviceOutcomes({ circuit, points, parameters: { cautionShare } }: RuleInput<typeof parameters>, device: Blocking): readonly Outcome[] {
   const { part, measure, across, clampVolts } = device;
   const base = { severity: 'stop', target: { device: [part.id] }, refs: [part.ref] } as const;
   const rating = ratingOf(part, device.fact, device.words);
   if (!rating) return [missingFact(part, device.fact, device.words, base)];
+  if (needsTransient(circuit, part)) return [needsTransientOutcome(part, 'volts', base)];
   const clamp = clampVolts > 0 ? `, ${say(clampVolts, 'V')} of its clamp included` : '';
   return points.stations.map((station) => {
     const verdict = judgeStress(points, station, measure, [

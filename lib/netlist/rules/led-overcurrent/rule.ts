@@ -3,11 +3,12 @@ import { unlimitedVolts } from '../../circuit/unlimited-path';
 import type { Control } from '../../circuit/sources';
 import { walk } from '../../circuit/walk';
 import type { Outcome, Rule, RuleInput } from '../rule';
-import { needsTransient, voltsAcross } from '../support/alternating';
+import { voltsAcross } from '../support/alternating';
+import { needsTransient, needsTransientOutcome } from '../support/needs-transient';
 import { ampsInto, branchRefs, branchTarget, ledAmps, ledLimitSource, weakestLed } from '../support/led-current';
 import { resizeRemedy } from '../support/led-resistor-choice';
 import { driverLimit } from '../support/driver-limit';
-import { atPoint, atStation, everywhere, missingFact } from '../support/outcome';
+import { atPoint, atStation, missingFact } from '../support/outcome';
 import type { Rating } from '../support/rating';
 import { crossingEvidence, crossingVolts, judgeStress, refusalWords, stressEvidence, type StressLimit } from '../support/stress';
 import { placeWords, say } from '../support/words';
@@ -36,7 +37,7 @@ function branchOutcomes(input: Input, branch: LedBranch): readonly Outcome[] {
   const weakest = weakestLed(branch);
   if ('missing' in weakest) return [missingFact(weakest.missing, 'if_max', 'I_F maximum', base)];
   const { led, amps } = weakest;
-  if (needsTransient(circuit, led)) return [everywhere({ ...base, outcome: 'undetermined', message: `${led.ref} is fed through a capacitor: its current needs a transient run`, evidence: [], missing: 'needs transient' })];
+  if (needsTransient(circuit, led)) return [needsTransientOutcome(led, 'current', base)];
   const limits: readonly StressLimit[] = [
     { severity: 'caution', limit: amps, at: 'stated', source: ledLimitSource(led, 1) },
     { severity: 'caution', limit: amps, at: 'raised', source: ledLimitSource(led, 1) },

@@ -1,10 +1,11 @@
 import type { LedBranch } from '../../circuit/led-branches';
 import { unlimitedVolts } from '../../circuit/unlimited-path';
 import type { Outcome, Rule, RuleInput } from '../rule';
-import { needsTransient, voltsAcross } from '../support/alternating';
+import { voltsAcross } from '../support/alternating';
+import { needsTransient, needsTransientOutcome } from '../support/needs-transient';
 import { branchRefs, branchTarget, ledAmps, undersizedLimit, weakestLed } from '../support/led-current';
 import { resizeRemedy } from '../support/led-resistor-choice';
-import { atPoint, atStation, everywhere, missingFact } from '../support/outcome';
+import { atPoint, atStation, missingFact } from '../support/outcome';
 import { crossingEvidence, crossingVolts, judgeStress, refusalWords, stressEvidence } from '../support/stress';
 import { listWords, placeWords, say } from '../support/words';
 
@@ -17,7 +18,7 @@ function branchOutcomes({ circuit, points, parameters: { stopFactor } }: RuleInp
   const weakest = weakestLed(branch);
   if ('missing' in weakest) return [missingFact(weakest.missing, 'if_max', 'I_F maximum', base)];
   const { led, amps } = weakest;
-  if (needsTransient(circuit, led)) return [everywhere({ ...base, outcome: 'undetermined', message: `${led.ref} is fed through a capacitor: its current needs a transient run`, evidence: [], missing: 'needs transient' })];
+  if (needsTransient(circuit, led)) return [needsTransientOutcome(led, 'current', base)];
   const limits = [undersizedLimit(led, amps, stopFactor)];
   const names = listWords(branch.resistors.map((part) => part.ref));
   const top = Math.max(0, ...points.ok.filter((point) => !point.staticOn)

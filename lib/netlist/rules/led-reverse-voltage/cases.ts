@@ -15,6 +15,8 @@ export const cases: readonly RuleCase[] = [
   { name: '4 V', deck: backwards('4'), expect: { outcome: 'pass' } },
   { name: 'the sheet allows 15 V', deck: backwards('12', 'vf=2 if_max=25m vr_max=15'), expect: { outcome: 'pass' } },
   { name: 'a diode the other way round', deck: alternating('D2 0 a DX\n*@D2 vr_max=100 if_max=0.2'), expect: { outcome: 'pass' } },
+  { name: 'a diode in series', deck: deck('V1 l 0 SIN(0 17 50)\n*@V1 rms=12', resistor('R1', 'l', 'x', '1k', 'pmax=1'), 'D2 x a DX\n*@D2 vr_max=100 if_max=0.2', led('D1', 'a', '0')), expect: { outcome: 'not applicable' } },
+  { name: 'fed through a capacitor', deck: deck('V1 l 0 SIN(0 17 50)\n*@V1 rms=12', 'RL l 0 100\n*@RL load=heater', 'C1 l x 1u\n*@C1 vmax=63', resistor('R1', 'x', 'a', '1k', 'pmax=1'), led('D1', 'a', '0'), 'D2 0 a DX\n*@D2 vr_max=100 if_max=0.2'), expect: { outcome: 'undetermined', says: 'needs transient' } },
   { name: 'lit', deck: deck('V1 vbus 0 12', resistor('R1', 'vbus', 'a', '1k'), led('D1', 'a', '0')), expect: { outcome: 'pass' } },
   { name: 'no LED', deck: 'V1 vbus 0 12\nR1 vbus 0 1k', expect: { outcome: 'none' } },
   withParameter(twelve, 'assumedVr', 14, { outcome: 'pass' }),

@@ -2,7 +2,8 @@ import { magnitudeOf, originOf } from '../../circuit/part-facts';
 import type { NetlistPart } from '../../netlist';
 import { voltsOf, type RunPoint } from '../../points/point-set';
 import type { Outcome, Rule, RuleInput } from '../rule';
-import { atPoint, atStation } from '../support/outcome';
+import { needsTransient, needsTransientOutcome } from '../support/needs-transient';
+import { atPoint, atStation, everywhere } from '../support/outcome';
 import { crossingEvidence, crossingVolts, judgeStress, refusalWords, stressEvidence } from '../support/stress';
 import { placeWords, say } from '../support/words';
 
@@ -16,6 +17,11 @@ function ledOutcomes({ circuit, points, parameters: { assumedVr } }: RuleInput<t
   const branch = circuit.ledBranches.find((one) => one.leds.includes(led));
   const base = { severity: 'stop', target: { led: [led.id] }, refs: [led.ref, ...(branch?.resistors ?? []).slice(0, 1).map((part) => part.ref)] } as const;
   const own = magnitudeOf(led, 'vr_max');
+  const blocking = branch?.parts.find((part) => part.kind === 'diode' || part.kind === 'schottky');
+  if (blocking) {
+    return [everywhere({ ...base, outcome: 'not applicable', message: `${led.ref}: ${blocking.ref} in series blocks for it, and lets no more than its leakage through`, evidence: [] })];
+  }
+  if (needsTransient(circuit, led)) return [needsTransientOutcome(led, 'reverse volts', base)];
   const limit = own ?? assumedVr;
   const source = own === undefined ? 'V_R of indicator LEDs, assumed' : `V_R maximum of ${led.ref}, ${originOf(led, 'vr_max')}`;
   const confidence = own === undefined ? 'likely' : 'proven';

@@ -4,6 +4,7 @@ import type { NetlistPart } from '../../netlist';
 import type { Outcome, Rule, RuleInput } from '../rule';
 import { blockingParts } from '../support/device-stress';
 import { isMainsFed } from '../support/mains';
+import { needsTransient, needsTransientOutcome } from '../support/needs-transient';
 import { atPoint, atStation, missingFact } from '../support/outcome';
 import { ratingOf } from '../support/rating';
 import { magnitudeAcross } from '../support/resistor-heat';
@@ -55,8 +56,9 @@ function capacitorMargins({ circuit, netlist, parameters: { capacitorShare } }: 
   });
 }
 
-function marginOutcomes({ points }: Input, { part, quantity, rating, share, measure, rung, added }: Margin): readonly Outcome[] {
+function marginOutcomes({ circuit, points }: Input, { part, quantity, rating, share, measure, rung, added }: Margin): readonly Outcome[] {
   const base = { severity: 'stop', target: { part: [part.id] }, refs: [part.ref] } as const;
+  if (needsTransient(circuit, part)) return [needsTransientOutcome(part, 'volts', base)];
   const stop: StressLimit = { severity: 'stop', limit: rating.value, at: 'stated', source: rating.source };
   const caution: StressLimit = { severity: 'caution', limit: rating.value * share, at: 'stated', source: `${share * 100} % of the ${rating.source}` };
   return points.stations.map((station) => {

@@ -4,10 +4,10 @@ import { endNets } from '../../circuit/terminals';
 import type { Remedy } from '../../findings/finding';
 import type { NetlistPart } from '../../netlist';
 import type { Outcome, Rule, RuleInput } from '../rule';
-import { needsTransient } from '../support/alternating';
+import { needsTransient, needsTransientOutcome } from '../support/needs-transient';
 import { heatLimits, magnitudeAcross, powerRating, resistorWatts } from '../support/resistor-heat';
 import { wattsFor } from '../support/led-resistor-choice';
-import { atPoint, atStation, everywhere, missingFact } from '../support/outcome';
+import { atPoint, atStation, missingFact } from '../support/outcome';
 import { crossingEvidence, crossingVolts, judgeStress, refusalWords, stressEvidence } from '../support/stress';
 import { placeWords, say } from '../support/words';
 
@@ -28,7 +28,7 @@ function resistorOutcomes({ circuit, points, parameters: shares }: RuleInput<typ
   if (ohms === undefined || ohms <= 0) return [missingFact(part, 'value', 'resistance', base)];
   const rating = powerRating(part);
   if (!rating) return [missingFact(part, 'pmax', 'power rating or package', base)];
-  if (needsTransient(circuit, part)) return [everywhere({ ...base, outcome: 'undetermined', message: `${part.ref} is fed through a capacitor: its watts need a transient run`, evidence: [], missing: 'needs transient' })];
+  if (needsTransient(circuit, part)) return [needsTransientOutcome(part, 'watts', base)];
   const watts = resistorWatts(circuit, points, part);
   const worst = Math.max(0, ...points.ok.filter((point) => !point.staticOn).map((point) => watts(point) ?? 0));
   return points.stations.map((station) => {

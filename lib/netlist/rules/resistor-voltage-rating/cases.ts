@@ -16,6 +16,7 @@ export const cases: readonly RuleCase[] = [
   { name: '12 V', deck: across('12', 'pmax=0.25'), expect: { outcome: 'pass' } },
   unknown,
   { name: '60 V without a rating', deck: across('60', 'pmax=0.25'), expect: { outcome: 'undetermined', says: 'vmax' } },
+  { name: 'fed through a capacitor', deck: deck('V1 l 0 SIN(0 325 50)\n*@V1 role=mains rms=230', 'C1 l a 100n\n*@C1 vmax_ac=275', 'R1 a 0 10k\n*@R1 pmax=1 vmax=250'), expect: { outcome: 'undetermined', says: 'needs transient' } },
   { name: 'a load is no resistor here', deck: across('325', 'load=heater'), expect: { outcome: 'none' } },
   withParameter(unknown, 'anyResistor', 20, { outcome: 'undetermined' }),
 ];

@@ -5,6 +5,7 @@ import type { NetlistPart } from '../../netlist';
 import type { Outcome, Rule, RuleInput } from '../rule';
 import { magnitudeAcross } from '../support/resistor-heat';
 import { voltageRating } from '../support/resistor-volts';
+import { needsTransient, needsTransientOutcome } from '../support/needs-transient';
 import { atPoint, atStation } from '../support/outcome';
 import { crossingEvidence, crossingVolts, judgeStress, refusalWords, stressEvidence } from '../support/stress';
 import { placeWords, say } from '../support/words';
@@ -13,8 +14,9 @@ const parameters = {
   anyResistor: { value: 50, unit: 'V', words: 'volts that every resistor stands, whatever its package', source: 'common practice, no source' },
 } as const;
 
-function resistorOutcomes({ points, parameters: { anyResistor } }: RuleInput<typeof parameters>, part: NetlistPart): readonly Outcome[] {
+function resistorOutcomes({ circuit, points, parameters: { anyResistor } }: RuleInput<typeof parameters>, part: NetlistPart): readonly Outcome[] {
   const base = { severity: 'stop', target: { resistor: [part.id] }, refs: [part.ref], nets: [...(endNets(part) ?? [])] } as const;
+  if (needsTransient(circuit, part)) return [needsTransientOutcome(part, 'volts', base)];
   const own = voltageRating(part);
   const rating = own ?? { value: anyResistor, source: 'least voltage rating of any resistor, assumed' };
   const measure = magnitudeAcross(part);

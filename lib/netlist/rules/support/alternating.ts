@@ -1,7 +1,5 @@
 import type { Circuit } from '../../circuit/circuit';
-import { isAlternating } from '../../circuit/source-role';
 import { endNets } from '../../circuit/terminals';
-import { walk } from '../../circuit/walk';
 import type { NetlistPart } from '../../netlist';
 import { alternatingBandTop } from '../../points/plan-points';
 import { voltsOf, type PointSet, type RunPoint } from '../../points/point-set';
@@ -34,25 +32,4 @@ export function meanSquareVolts(circuit: Circuit, points: PointSet, point: RunPo
   const opposite = voltsAcross(other, part) ?? 0;
   const smoothed = volts * opposite > 0 && (endNets(part) ?? []).some((net) => net !== '0' && circuit.smoothedNets.has(net));
   return smoothed ? volts * volts : (volts * volts + opposite * opposite) / 4 / (alternatingBandTop * alternatingBandTop);
-}
-
-/** Whether a part is fed from an alternating source through a capacitor in series: two DC points cannot decide it. */
-export function needsTransient(circuit: Circuit, part: NetlistPart): boolean {
-  const sources = circuit.sources.supplies.filter(isAlternating);
-  if (sources.length === 0) return false;
-  const ends = endNets(part) ?? [];
-  const lines = new Set(sources.flatMap((source) => endNets(source) ?? []).filter((net) => net !== '0'));
-  return ends.some((start) => reachesThroughCapacitor(circuit, start, lines)) && !ends.some((start) => reachesDirect(circuit, start, lines));
-}
-
-const conducting = new Set(['resistor', 'joint', 'coil', 'junction', 'channel']);
-
-function reachesDirect(circuit: Circuit, start: string, lines: ReadonlySet<string>): boolean {
-  const steps = walk(circuit.graph, start, { through: ({ nature }) => conducting.has(nature), stopAt: (net) => net === '0' });
-  return [...steps.keys()].some((net) => lines.has(net));
-}
-
-function reachesThroughCapacitor(circuit: Circuit, start: string, lines: ReadonlySet<string>): boolean {
-  const steps = walk(circuit.graph, start, { through: ({ nature }) => conducting.has(nature) || nature === 'capacitor', stopAt: (net) => net === '0' });
-  return [...steps.keys()].some((net) => lines.has(net));
 }
