@@ -10,7 +10,7 @@ export const fuseKind: Kind = {
   letter: 'F',
   pins: [{ name: '1', x: -30, y: 0 }, { name: '2', x: 30, y: 0 }],
   fields: [
-    { fact: 'value', label: 'Rated current', unit: 'A', required: true, min: 0.001, max: 10_000 },
+    { fact: 'value', label: 'Rated current', unit: 'A', rating: true, min: 0.001, max: 10_000 },
     { fact: 'vmax', rating: true }, { fact: 'rs', label: 'Cold resistance' }, { fact: 'part' }, { fact: 'package' },
   ],
   defaults: {},

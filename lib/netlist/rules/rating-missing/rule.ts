@@ -6,7 +6,7 @@ import type { Netlist, NetlistPart } from '../../netlist';
 import type { Outcome, Rule, RuleParameters } from '../rule';
 import { everywhere } from '../support/outcome';
 import { powerRating } from '../support/resistor-heat';
-import { listWords } from '../support/words';
+import { inSentence, listWords } from '../support/words';
 
 const parameters = {} satisfies RuleParameters;
 
@@ -38,7 +38,7 @@ function judge(netlist: Netlist, part: NetlistPart): readonly Outcome[] {
   const base = { severity: 'advice', target: { part: [part.id] }, refs: [part.ref] } as const;
   const evidence = ratings.map((fact) => ({ entity: part.ref, quantity: fact, value: !missing.includes(fact), unit: '', source: 'given on the sheet' }));
   if (missing.length === 0) return [everywhere({ ...base, outcome: 'pass', message: `${part.ref} has the ratings that rules ask for`, evidence })];
-  const words = listWords(missing.map((fact) => factRegistry[fact].label));
+  const words = listWords(missing.map((fact) => inSentence(factRegistry[fact].label)));
   return [everywhere({
     ...base, outcome: 'fail', message: `${part.ref} has no ${words}: rules that need ${missing.length === 1 ? 'it' : 'them'} cannot decide`, evidence,
     remedy: { words: `Read ${missing.length === 1 ? 'it' : 'them'} off ${part.ref}’s data sheet (${missing.join(', ')}).` },

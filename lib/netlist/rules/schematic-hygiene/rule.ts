@@ -6,7 +6,7 @@ import type { NetlistPart } from '../../netlist';
 import { isPreferred, nearest, type SeriesName } from '../../series/preferred-values';
 import type { Outcome, Rule, RuleParameters } from '../rule';
 import { everywhere } from '../support/outcome';
-import { listWords, say } from '../support/words';
+import { inSentence, listWords, say } from '../support/words';
 import { classLetters } from './class-letters';
 
 const parameters = {} satisfies RuleParameters;
@@ -54,7 +54,7 @@ function judgeDesignator(part: NetlistPart, taken: readonly string[]): readonly 
   const ref = nextDesignator(accepted[0]!, taken);
   return [everywhere({
     ...base, outcome: 'fail', evidence,
-    message: `${part.ref} is a ${kindOf(part.kind).title.toLowerCase()}: its designator usually is ${accepted[0]} and a number`,
+    message: `${part.ref} is drawn as ${inSentence(kindOf(part.kind).title)}: its designator usually is ${accepted[0]} and a number`,
     remedy: { words: `Call it ${ref}.`, edits: [{ edit: 'rename part', partId: part.id, ref }] },
   })];
 }

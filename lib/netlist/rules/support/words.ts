@@ -42,3 +42,6 @@ export function listWords(words: readonly string[]): string {
   if (words.length < 2) return words[0] ?? '';
   return `${words.slice(0, -1).join(', ')} and ${words[words.length - 1]}`;
 }
+
+/** A title or label inside a sentence: its first letter small, unless it begins a name of capitals (`LED`, `MOSFET`, `V_GS`). */
+export const inSentence = (label: string): string => (/^[A-Z][a-z]/.test(label) ? `${label[0]!.toLowerCase()}${label.slice(1)}` : label);

@@ -18,5 +18,6 @@ export const cases: readonly RuleCase[] = [
   { name: 'all given', deck: stage, expect: { outcome: 'pass' } },
   { name: 'a wave says the levels', deck: drive, expect: { outcome: 'pass' } },
   { name: 'a zener with a model card', deck: 'V1 a 0 12\n*@V1 role=supply\nD1 0 a DZ\n*@D1 kind=zener\n.model DZ D(BV=5.1)', expect: { outcome: 'pass' } },
+  { name: 'a fuse of a deck, whose amps are a rating', deck: `V1 a 0 12\n*@V1 role=supply\nR1 a b 10m\n*@R1 kind=fuse\nR2 b 0 1k`, expect: { outcome: 'pass' } },
   { name: 'a piece of wire', deck: 'R1 0 0 1m\n*@R1 wire=yes', expect: { outcome: 'none' } },
 ];

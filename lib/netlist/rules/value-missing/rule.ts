@@ -5,7 +5,7 @@ import type { FieldDefinition } from '../../kinds/kind';
 import type { Netlist, NetlistPart } from '../../netlist';
 import type { Outcome, Rule, RuleParameters } from '../rule';
 import { everywhere } from '../support/outcome';
-import { listWords } from '../support/words';
+import { inSentence, listWords } from '../support/words';
 
 const parameters = {} satisfies RuleParameters;
 
@@ -24,7 +24,7 @@ function isImplied({ kind, facts }: NetlistPart, fact: FactKey): boolean {
 const missingFields = (part: NetlistPart): readonly FieldDefinition[] => kindOf(part.kind).fields
   .filter(({ fact, required }) => required && (part.facts[fact] === undefined || part.facts[fact] === '') && !isImplied(part, fact));
 
-const wordsOf = ({ fact, label }: FieldDefinition): string => (label ?? factRegistry[fact].label).toLowerCase();
+const wordsOf = ({ fact, label }: FieldDefinition): string => inSentence(label ?? factRegistry[fact].label);
 
 function judge(netlist: Netlist, part: NetlistPart): readonly Outcome[] {
   const required = kindOf(part.kind).fields.filter((field) => field.required);
