@@ -33,6 +33,18 @@ function largest(points: readonly RunPoint[], measure: Measure): { readonly poin
   return worst;
 }
 
+/** Stresses this near to each other are one: leakage and a supply's own ohms make no state worse than another. */
+const same = 1e-3;
+
+/** The first point, in planned order, that is as bad as the worst: it needs no lead off and no limit left out to be said. */
+function plainest(points: readonly RunPoint[], measure: Measure, worst: { readonly point: RunPoint; readonly value: number }, limit: number) {
+  for (const point of points) {
+    const value = measure(point);
+    if (value !== undefined && value > limit && value >= worst.value * (1 - same)) return { point, value };
+  }
+  return worst;
+}
+
 /**
  * The worst of a stress at one station against its limits, worst limit first. `heat` leaves out points whose currents
  * and watts say nothing. Null where no point gives a number.
@@ -40,8 +52,9 @@ function largest(points: readonly RunPoint[], measure: Measure): { readonly poin
 export function judgeStress(points: PointSet, station: Station, measure: Measure, limits: readonly StressLimit[], { heat }: { readonly heat: boolean }): StressVerdict | null {
   const usable = points.at(station).filter((point) => !(heat && point.staticOn));
   for (const limit of limits) {
-    const worst = largest(limit.at === 'stated' ? usable.filter((point) => point.stated) : usable, measure);
-    if (worst && worst.value > limit.limit) return { severity: limit.severity, ...worst, limit };
+    const judged = limit.at === 'stated' ? usable.filter((point) => point.stated) : usable;
+    const worst = largest(judged, measure);
+    if (worst && worst.value > limit.limit) return { severity: limit.severity, ...plainest(judged, measure, worst, limit.limit), limit };
   }
   const rest = largest(usable.filter((point) => point.stated), measure);
   return rest ? { severity: null, ...rest, limit: limits[limits.length - 1]! } : null;
