@@ -1,7 +1,7 @@
 import { kindIds, type KindId } from '../kinds/kind-id';
 
 /** Other words of a deck for our kinds and for those that are labels as yet. */
-const otherWords: ReadonlyMap<string, string> = new Map([['lead', 'removable-lead'], ['gpio', 'controller-pin']]);
+const otherWords: ReadonlyMap<string, string> = new Map([['lead', 'removable-lead'], ['gpio', 'controller-pin'], ['plug', 'plug-contact']]);
 
 /** The kind that `kind=` names, in any case; undefined for a label. */
 export function kindOfWord(word: unknown): KindId | undefined {

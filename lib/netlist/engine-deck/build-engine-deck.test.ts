@@ -109,9 +109,9 @@ describe('what has no DC path', () => {
 
 describe('a refusal', () => {
   it('names the part and the fact that is missing', () => {
-    expect(build([...stage, bareTwoPin('resistor', 'R3', 'BUS', '0')])).toMatchObject({ code: 'missing-fact', words: 'R3 value' });
-    expect(build([supply, load, { ...fet, facts: { vth_typ: 3 } }, pullDown])).toMatchObject({ words: 'Q1 rds_on' });
-    expect(build([supply, barePart('box', 'E1', { 1: 'BUS', 2: '0' }, { element: 'E' })])).toMatchObject({ words: 'E1 kind' });
+    expect(build([...stage, bareTwoPin('resistor', 'R3', 'BUS', '0')])).toMatchObject({ code: 'missing-fact', words: 'R3 has no value' });
+    expect(build([supply, load, { ...fet, facts: { vth_typ: 3 } }, pullDown])).toMatchObject({ words: 'Q1 has no rds_on' });
+    expect(build([supply, barePart('box', 'E1', { 1: 'BUS', 2: '0' }, { element: 'E' })])).toMatchObject({ words: 'E1 stands as a box: it is not simulated' });
   });
 
   it('names a ring of sources', () => {

@@ -106,7 +106,8 @@ function elementsOf(
 }
 
 function missingFact(part: NetlistPart, fact: string): Refusal {
-  return { code: 'missing-fact', words: `${part.ref} ${fact}`, nodes: [], parts: [part.ref] };
+  const words = part.kind === 'box' ? `${part.ref} stands as a box: it is not simulated` : `${part.ref} has no ${fact}`;
+  return { code: 'missing-fact', words, nodes: [], parts: [part.ref] };
 }
 
 function decode(
