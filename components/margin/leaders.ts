@@ -47,8 +47,7 @@ const aText = 1_000;
 
 /**
  * Moves entries a little up or down within the room between their neighbours, so that their leaders cross no text and, where
- * that is near, no symbol. Order and
- * distances stay. `columnTop` is where the column begins on the canvas.
+ * that is near, no symbol. Order and distances stay. `columnTop` is where the column begins on the canvas.
  */
 export function settleTops(entries: readonly Standing[], targets: Targets, columnTop: number, room: number, gap = 6): ReadonlyMap<string, number> {
   const tops = new Map<string, number>();
@@ -56,7 +55,8 @@ export function settleTops(entries: readonly Standing[], targets: Targets, colum
   for (const [index, { key, top, height }] of entries.entries()) {
     const next = entries[index + 1];
     const highest = Math.max(free, (next ? next.top - gap : Math.max(room, top + height)) - height);
-    const ends = visibleEnds(targets, key);
+    // An entry below the canvas has no leader: nothing to spare.
+    const ends = columnTop + Math.max(free, top) > targets.height ? [] : visibleEnds(targets, key);
     let best = { top: Math.max(free, top), burden: Infinity };
     for (const [tries, shift] of (ends.length === 0 ? [0] : shifts).entries()) {
       if (tries >= shiftsForObstacles && best.burden < aText) break;

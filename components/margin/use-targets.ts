@@ -1,5 +1,6 @@
 'use client';
 import { useEffect, useState } from 'react';
+import { inSight } from './in-sight';
 import type { MarginEntry } from './margin-entry';
 import type { Box, MarginAnchor, Obstacles, SheetGeometry, SheetTarget } from './sheet-geometry';
 
@@ -19,7 +20,12 @@ function read(geometry: SheetGeometry, wanted: readonly { readonly key: string; 
     const target = anchor === null ? null : geometry.targetOf(anchor);
     if (target) of.set(key, target);
   }
-  return { of, texts: geometry.texts(), obstacles: geometry.obstacles(), ...geometry.size() };
+  const size = geometry.size();
+  const { symbols, levelWires } = geometry.obstacles();
+  return {
+    of, texts: inSight(geometry.texts(), size, 'words'),
+    obstacles: { symbols: inSight(symbols, size, 'symbol'), levelWires: inSight(levelWires, size, 'wire') }, ...size,
+  };
 }
 
 /** Where entries' targets are on the screen, read again after each frame that moved something. */
