@@ -93,6 +93,7 @@ export function SheetPage() {
           snapshot={snapshot}
           pane={pane}
           title={circuit.data.title}
+          maker={circuit.data.makers[0]?.name ?? ''}
           newest={newest}
           moved={moved}
           shown={point ? { name: point.name, volts: point.peak } : null}

@@ -32,12 +32,13 @@ interface SheetStatusProps {
 export function SheetStatus({ editor, session, snapshot, live, entries, plan, message, readOnly }: SheetStatusProps) {
   const stop = entries.find((entry) => entry.kind === 'stop');
   const at = stop?.kind === 'stop' ? plan.find((point) => point.name === stop.finding.holdPoint) ?? plan[0] : undefined;
-  const state = !live ? 'Checking' : stop ? at ? `Blocked at ${voltsWords(at.volts)}` : 'A stop is open' : 'Within limits';
+  const open = entries.some((entry) => entry.kind === 'undetermined');
+  const state = !live ? 'Checking' : stop ? at ? `Blocked at ${voltsWords(at.volts)}` : 'A stop is open' : plan.length === 0 ? 'Draft, no plan yet' : open ? 'No stop, not all determined' : 'Within limits';
   const lamp = saveLamp(snapshot);
   const others = snapshot?.others.length ?? 0;
   return (
     <StatusStrip
-      lamp={!live ? 'working' : stop ? 'stop' : 'ok'}
+      lamp={!live ? 'working' : stop ? 'stop' : plan.length === 0 ? 'off' : open ? 'caution' : 'ok'}
       state={state}
       notes={[
         readOnly && snapshot?.loaded ? <span className="inline-flex items-center gap-1.5"><Icon name="lock" className="size-3" />{snapshot.room.state === 'quarantined' ? snapshot.room.why : 'Read only for you'}</span> : null,

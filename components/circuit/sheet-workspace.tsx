@@ -20,6 +20,7 @@ import type { Revision } from '@/lib/schemas/revision';
 import type { SheetSession, SheetSnapshot } from '@/realtime/client/sheet-session';
 import { draftLetter, type Moved } from './draft-words';
 import type { PhonePane } from './phone-switch';
+import { signedTo } from './signed-state';
 
 export interface SheetWorkspaceProps {
   readonly editor: Editor | null;
@@ -28,6 +29,8 @@ export interface SheetWorkspaceProps {
   readonly snapshot: SheetSnapshot | null;
   readonly pane: PhonePane;
   readonly title: string;
+  /** Who made the circuit, for the title block until a revision is cut. */
+  readonly maker: string;
   readonly newest: Revision | undefined;
   readonly moved: Moved;
   readonly shown: { readonly name: string; readonly volts: number } | null;
@@ -48,8 +51,14 @@ function toCanvas(): void {
   document.querySelector<HTMLElement>('.sheet-canvas')?.focus();
 }
 
+/** What of the newest revision is signed, for the title block: `B to 12 V, R. Adeyemi`. */
+function signedWords(newest: Revision | undefined): string {
+  const to = newest && signedTo(newest, new Date());
+  return to ? `${newest.letter} to ${voltsWords(to.volts)}, ${shortName(to.signOff.by.name)}` : 'nothing yet';
+}
+
 /** Drawer, canvas and margin side by side. */
-export function SheetWorkspace({ editor, state, session, snapshot, pane, title, newest, moved, shown, volts, selected, planning, onPlanning, listing, onListing, onGeometry, margin }: SheetWorkspaceProps) {
+export function SheetWorkspace({ editor, state, session, snapshot, pane, title, maker, newest, moved, shown, volts, selected, planning, onPlanning, listing, onListing, onGeometry, margin }: SheetWorkspaceProps) {
   const [zigzag, setZigzag] = useResistorForm();
   const pointAt = usePresence(session, state);
   const refs = selected && selected.kind !== 'note' ? selected.finding.refs : [];
@@ -77,8 +86,9 @@ export function SheetWorkspace({ editor, state, session, snapshot, pane, title, 
                 onGeometry={onGeometry}
                 titleBlock={[
                   { legend: 'Title', value: title, wide: true },
-                  { legend: 'Drawn', value: newest ? shortName(newest.cutBy.name) : '' },
-                  { legend: 'Date', value: newest ? <Moment at={newest.cutAt} form="day" /> : '' },
+                  { legend: 'Drawn', value: shortName(newest?.cutBy.name ?? maker) },
+                  { legend: 'Signed off', value: signedWords(newest) },
+                  ...(newest ? [{ legend: 'Date', value: <Moment at={newest.cutAt} form="day" /> }] : []),
                   { legend: 'Revision', value: draftLetter(newest, moved), strong: true },
                 ]}
               />

@@ -4,7 +4,7 @@ import { TextField } from '@/components/ui/field';
 import type { PartRecord, Sheet } from '@/lib/document/records';
 import type { Editor } from '@/lib/editor/editor';
 import { pinDefinitionsOf } from '@/lib/document/geometry/kind-shape';
-import { spokenPart } from '@/lib/editor/spoken/part-spoken';
+import { joinedWords } from '@/lib/editor/spoken/part-spoken';
 import { kindOf } from '@/lib/netlist/kinds/kind-registry';
 import { pinStates } from '../canvas/pin-states';
 import { FactField } from './fact-field';
@@ -13,12 +13,12 @@ import { FactField } from './fact-field';
 export function PropertyForm({ editor, sheet, part, onClose }: { readonly editor: Editor; readonly sheet: Sheet; readonly part: PartRecord; readonly onClose: () => void }) {
   const kind = kindOf(part.kind);
   const [main, ...rest] = kind.fields;
-  const between = /, from (.+)$/.exec(spokenPart(sheet, part))?.[1];
+  const joined = part.kind === 'note' || part.kind === 'net-name' ? '' : joinedWords(sheet, part);
   return (
     <section aria-label={`${part.ref || kind.title}, ${kind.title}`} data-form={part.ref || part.id} className="bg-film-2 outline-2 -outline-offset-1 outline-act">
       <header className="flex h-9 items-center gap-2 border-b border-act px-3">
-        <h3 className="min-w-0 truncate font-cond text-lg font-semibold text-act">{[part.ref, kind.title.toLowerCase()].filter(Boolean).join(', ')}</h3>
-        <span className="ml-auto truncate text-sm text-ink-2">{between ? `from ${between}` : ''}</span>
+        <h3 className="max-w-[60%] flex-none truncate font-cond text-lg font-semibold text-act">{[part.ref, kind.title.toLowerCase()].filter(Boolean).join(', ')}</h3>
+        <span title={joined} className="ml-auto min-w-0 truncate text-sm text-ink-2">{joined}</span>
         <button type="button" aria-label="Close the form" onClick={onClose} className="-mr-1 size-6 flex-none text-lg leading-none text-ink-2 hover:text-act">×</button>
       </header>
       <div className="flex flex-col gap-3 px-3 pt-2.5 pb-3">

@@ -14,6 +14,17 @@ function mainValue(part: PartRecord): string {
   return key === undefined || value === undefined ? '' : formatFact(kind, key, value as Parameters<typeof formatFact>[2]);
 }
 
+/** What a part joins, in words: `from GATE to 0 V`, `G on GATE, D on SW, S on 0 V`, or `joined to nothing`. */
+export function joinedWords(sheet: Sheet, part: PartRecord): string {
+  const netlist = sheetToNetlist(sheet);
+  const pins = Object.entries(netlist.parts.find((one) => one.id === part.id)?.pins ?? {}).map(([pin, net]) => [pin, netWords(netlist, net, part.ref)] as const);
+  const [first, second] = pins;
+  if (pins.every(([, net]) => net === 'nothing')) return 'joined to nothing';
+  if (pins.length === 1 && first) return `on ${first[1]}`;
+  if (pins.length === 2 && first && second) return `from ${first[1]} to ${second[1]}`;
+  return pins.map(([pin, net]) => `${pin} on ${net}`).join(', ');
+}
+
 /** What a part is and what it joins, as it is spoken: `R2, 10 kΩ, from GATE to 0 V`. */
 export function spokenPart(sheet: Sheet, part: PartRecord): string {
   const words = typeof part.facts.name === 'string' ? part.facts.name : typeof part.facts.text === 'string' ? part.facts.text : '';
@@ -21,14 +32,9 @@ export function spokenPart(sheet: Sheet, part: PartRecord): string {
   if (part.kind === 'net-name') return `Net name ${words}`;
   if (part.kind === 'zero-volt') return '0 V';
   if (part.kind === 'earth') return 'Earth';
-  const netlist = sheetToNetlist(sheet);
-  const pins = Object.entries(netlist.parts.find((one) => one.id === part.id)?.pins ?? {});
   const lead = [part.ref, part.kind === 'box' ? 'not examined' : mainValue(part) || kindOf(part.kind).title].filter(Boolean).join(', ');
   const open = part.leftOpen.length > 0 ? `, ${part.leftOpen.join(' and ')} left open` : '';
-  const [first, second] = pins;
-  if (pins.length === 1 && first) return `${lead}, on ${netWords(netlist, first[1], part.ref)}${open}`;
-  if (pins.length === 2 && first && second) return `${lead}, from ${netWords(netlist, first[1], part.ref)} to ${netWords(netlist, second[1], part.ref)}${open}`;
-  return `${lead}, ${pins.map(([pin, net]) => `${pin} on ${netWords(netlist, net, part.ref)}`).join(', ')}${open}`;
+  return `${lead}, ${joinedWords(sheet, part)}${open}`;
 }
 
 /** What a net joins, as a wire of it is spoken: `Wire, net GATE: Q1:G, R3:2`. */
