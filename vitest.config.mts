@@ -13,6 +13,8 @@ export default defineConfig({
   resolve: { alias },
   test: {
     passWithNoTests: true,
+    // Parts run side by side and would write each other's.
+    cache: false,
     projects: [
       project('unit', ['{app,components,db,lib,realtime,scripts}/**/*.test.{ts,tsx,mts}']),
       project('integration', ['tests/integration/**/*.test.ts'], {

@@ -20,7 +20,7 @@ const scratch = mkdtempSync(path.join(tmpdir(), 'holdoff-soak-'));
 step(`The model of the review: ${steps} acts, seed ${seed}`);
 const code = await runTool(
   [path.join(root, 'node_modules/vitest/vitest.mjs'), 'run', '--project', 'integration', 'tests/integration/review-model'],
-  { root, scratch, env: { REVIEW_MODEL_STEPS: String(steps), REVIEW_MODEL_SEED: seed } },
+  { root, scratch, output: 'inherit' }, { REVIEW_MODEL_STEPS: String(steps), REVIEW_MODEL_SEED: seed },
 );
 rmSync(scratch, { recursive: true, force: true });
 process.exit(code);

@@ -8,16 +8,13 @@ import { playwrightTally, tallyFrom } from './tally.mjs';
 export const browserPart = {
   name: 'browser',
   needs: { mariadbd: 'mariadb-server', chromium: 'chromium' },
-  run: async ({ root, scratch }) => {
+  run: async (place) => {
+    const { root, scratch } = place;
     const report = path.join(scratch, 'browser.json');
     const product = await startProduct({ root, dataFolder: path.join(scratch, 'browser-data'), env: { PORT: String(await anyFreePort()) } });
     try {
-      const code = await runTool([path.join(root, 'node_modules/@playwright/test/cli.js'), 'test'], {
-        root,
-        scratch,
-        env: {
-          E2E_ADDRESS: product.address, E2E_ACCOUNTS: JSON.stringify(product.accounts), E2E_DATA_DIR: product.dataFolder, PLAYWRIGHT_JSON_OUTPUT_FILE: report,
-        },
+      const code = await runTool([path.join(root, 'node_modules/@playwright/test/cli.js'), 'test'], place, {
+        E2E_ADDRESS: product.address, E2E_ACCOUNTS: JSON.stringify(product.accounts), E2E_DATA_DIR: product.dataFolder, PLAYWRIGHT_JSON_OUTPUT_FILE: report,
       });
       return tallyFrom(report, code, playwrightTally);
     } finally {
