@@ -23,7 +23,9 @@ export const idempotency = mysqlTable('idempotency', {
   key: exactText('key', { length: 100 }).notNull(),
   /** SHA-256 of method, path and body: the same key for another request is refused. */
   requestHash: sha256Column('request_hash').notNull(),
-  /** False while the first request still runs. */
+  /** Id kept for the thing that the request makes: a request taken up again makes the same thing, so that there is never a second one. */
+  thingId: ulidColumn('thing_id'),
+  /** False while the first request still runs, and when it was cut off. */
   done: boolean('done').notNull().default(false),
   status: int('status'),
   answer: json('answer').$type<Record<string, unknown>>(),

@@ -12,7 +12,7 @@ export async function tidy(db: Database, now = new Date()): Promise<void> {
   const ago = (ms: number) => new Date(now.getTime() - ms);
   await forgetEndedSessions(db, now);
   await forgetOldFailures(db, ago(day));
-  await forgetOldKeys(db, ago(day), ago(60_000));
+  await forgetOldKeys(db, ago(day));
 }
 
 /** Tidies now and then for as long as the process lives. */

@@ -3,6 +3,6 @@ import type { Person } from '@/lib/access/caller';
 import type { Act } from '@/lib/review/act';
 
 /** Who acts, from a call: what use cases take. */
-export const actOf = ({ db, person, requestId }: { readonly db: Database; readonly person: Person; readonly requestId: string }): Act => (
-  { db, person, requestId, now: new Date() }
+export const actOf = ({ db, person, requestId, thing }: { readonly db: Database; readonly person: Person; readonly requestId: string; readonly thing: string | undefined }): Act => (
+  { db, person, requestId, thing, now: new Date() }
 );

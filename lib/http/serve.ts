@@ -29,6 +29,8 @@ export interface Call<T extends Target, Q extends z.ZodType, B extends z.ZodType
   readonly requestId: string;
   readonly address: string;
   readonly request: Request;
+  /** Id of what this call makes, given with its idempotency key: a use case that finds it made answers a repeat. */
+  readonly thing: string | undefined;
 }
 
 type RouteContext = { readonly params: Promise<Record<string, string>> };
@@ -79,14 +81,14 @@ async function pass<T extends Target, Q extends z.ZodType, B extends z.ZodType>(
   const url = new URL(request.url);
   const query = operation.query ? validated(operation.query, Object.fromEntries(url.searchParams)) : undefined;
   const body = operation.body ? await readBody(request, operation.body, operation.bodyLimit ?? plainBodyLimit) : undefined;
-  const call = {
-    db, caller, access, query, body, requestId, address, request,
+  const callFor = (thing?: string) => ({
+    db, caller, access, query, body, requestId, address, request, thing,
     get person(): Person {
       if (!person) throw new Problem('not-allowed', 'A guest link lets you read, nothing else.');
       return person;
     },
-  } as Call<T, Q, B>;
-  const run = () => (operation.engine && person ? withEngine(person, () => handle(call)) : handle(call));
+  } as Call<T, Q, B>);
+  const run = (thing?: string) => (operation.engine && person ? withEngine(person, () => handle(callFor(thing))) : handle(callFor(thing)));
   if (!person || operation.method === 'GET') return run();
   return once(db, person.id, request.headers.get('idempotency-key'), [operation.id, url.pathname, body ?? null], run);
 }

@@ -11,6 +11,8 @@ export interface Act {
   readonly requestId: string;
   /** Passed in so that a test decides what time it is. */
   readonly now: Date;
+  /** Id of what the act makes when it came with an idempotency key; one that is made already is answered, not made again. */
+  readonly thing?: string | undefined;
 }
 
 /** What a use case answers: the thing, and whether this was the first time. A repeat is answered with the first one's. */

@@ -32,7 +32,7 @@ export class DemoActors {
 
   async post(key: string, title: string, sheet: Sheet): Promise<string> {
     const access = await benchGate(this.db, this.caller(key), demoBench.slug);
-    return postSheet({ ...this.act(key), person: { id: mintPerson(this.id(key)) } }, access, title, sheet);
+    return (await postSheet({ ...this.act(key), person: { id: mintPerson(this.id(key)) } }, access, title, sheet)).value;
   }
 
   circuit(key: string, circuit: string): Promise<CircuitAccess> {

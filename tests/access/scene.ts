@@ -72,7 +72,7 @@ export async function sceneOf(world: ApiWorld, { bench, people }: Cast, holding:
   const signed = holding === 'sign-off'
     ? (await signOff(act(people.mentor), await reviewAs(people.mentor), { holdPoint: '15 V', contentHash: view.contentHash })).value : null;
   const objection = holding === 'objection' ? (await askForChanges(act(people.mentor), await reviewAs(people.mentor), 'Look again.')).value : null;
-  const note = async (mustAnswer: boolean) => openNote(act(people.mentor), await at(people.mentor), { anchor: { kind: 'spot', x: 0, y: 0 }, body: 'Why?', mustAnswer });
+  const note = async (mustAnswer: boolean) => (await openNote(act(people.mentor), await at(people.mentor), { anchor: { kind: 'spot', x: 0, y: 0 }, body: 'Why?', mustAnswer })).value;
   const thread = await note(false);
   const mustAnswer = holding === 'must-answer' ? await note(true) : null;
   const message = (await listThreadViews(world.db, await at(people.mentor))).find(({ id }) => id === thread)?.messages[0]?.id ?? '';

@@ -50,5 +50,5 @@ it('tidies what has run out and nothing else', async () => {
   await tidy(world.db, now);
   expect((await world.db.select().from(sessions).where(eq(sessions.userId, here.maker.id)))).toHaveLength(1);
   expect((await world.db.select({ failures: signInDelays.failures }).from(signInDelays))).toEqual([{ failures: 1 }]);
-  expect((await world.db.select({ key: idempotency.key }).from(idempotency))).toEqual([{ key: 'new' }]);
+  expect((await world.db.select({ key: idempotency.key }).from(idempotency))).toEqual([{ key: 'cut off' }, { key: 'new' }]);
 });

@@ -36,7 +36,7 @@ export async function benchWithCircuit(world: ApiWorld, sheet: Sheet | undefined
 /** Posts a circuit through its use case, drawn already. */
 export async function postAs(world: ApiWorld, bench: TestBench, maker: TestPerson, sheet: Sheet | undefined = reviewedSheet): Promise<string> {
   const access = await benchGate(world.db, callerOf(maker), bench.slug);
-  return postSheet({ db: world.db, person: { id: mintPerson(maker.id) }, requestId: 'test', now: new Date() }, access, 'Bench circuit', sheet);
+  return (await postSheet({ db: world.db, person: { id: mintPerson(maker.id) }, requestId: 'test', now: new Date() }, access, 'Bench circuit', sheet)).value;
 }
 
 /** Changes R1 as one edit of a person; answers the seq. */

@@ -4,8 +4,7 @@ import { given, made } from '@/lib/http/answer';
 import { listBenches, makeBench } from '@/lib/http/operations/people';
 import { serve } from '@/lib/http/serve';
 import { actOf } from '@/lib/http/act-of';
-import { first } from '@/lib/review/act';
 
 export const GET = serve(listBenches, async ({ db, person }) => given({ items: await ownBenches(db, person.id), next: null }));
 
-export const POST = serve(makeBench, async (call) => made(first(await make(actOf(call), call.body))));
+export const POST = serve(makeBench, async (call) => made(await make(actOf(call), call.body)));

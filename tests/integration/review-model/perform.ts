@@ -81,7 +81,7 @@ async function attempt({ world, bench, circuit, people, made }: Stage, action: A
       await liftObjection(act, await objectionGate(db, caller, made.objections[action.objection] ?? ''), action.reason ? { reason: 'r' } : {});
       return 'ok';
     case 'note':
-      made.threads.push(await openNote(act, await circuitGate(db, caller, circuit), { anchor: { kind: 'spot', x: 0, y: 0 }, body: 'n', mustAnswer: action.must }));
+      made.threads.push((await openNote(act, await circuitGate(db, caller, circuit), { anchor: { kind: 'spot', x: 0, y: 0 }, body: 'n', mustAnswer: action.must })).value);
       return 'ok';
     case 'resolve': {
       const access = await threadGate(db, caller, made.threads[action.thread] ?? '');

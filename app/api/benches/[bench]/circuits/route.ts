@@ -5,11 +5,10 @@ import { actOf } from '@/lib/http/act-of';
 import { given, made } from '@/lib/http/answer';
 import { listCircuits, postCircuit } from '@/lib/http/operations/circuits';
 import { serve } from '@/lib/http/serve';
-import { first } from '@/lib/review/act';
 
 export const GET = serve(listCircuits, async ({ db, access, person, query }) => given(await listBenchCircuits(db, access, person, query)));
 
 export const POST = serve(postCircuit, async (call) => {
-  const circuit = await post(actOf(call), call.access, call.body);
-  return made(first(await circuitViewOf(call.db, call.caller, circuit)));
+  const { value, first } = await post(actOf(call), call.access, call.body);
+  return made({ value: await circuitViewOf(call.db, call.caller, value), first });
 });

@@ -3,7 +3,6 @@ import { actOf } from '@/lib/http/act-of';
 import { given, made } from '@/lib/http/answer';
 import { listThreads, openThread } from '@/lib/http/operations/review';
 import { serve } from '@/lib/http/serve';
-import { first } from '@/lib/review/act';
 import { listThreadViews, threadView } from '@/lib/review/thread-view';
 import { openNote } from '@/lib/review/write-note';
 import { rooms } from '@/lib/rooms/room-client';
@@ -11,7 +10,7 @@ import { rooms } from '@/lib/rooms/room-client';
 export const GET = serve(listThreads, async ({ db, access }) => given({ items: await listThreadViews(db, access) }));
 
 export const POST = serve(openThread, async (call) => {
-  const id = await openNote(actOf(call), call.access, call.body);
+  const { value: id, first } = await openNote(actOf(call), call.access, call.body);
   await rooms().announce({ circuitId: call.access.circuit, topic: 'threads', data: { id } });
-  return made(first(await threadView(call.db, await threadGate(call.db, call.caller, id))));
+  return made({ value: await threadView(call.db, await threadGate(call.db, call.caller, id)), first });
 });

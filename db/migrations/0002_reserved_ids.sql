@@ -1,0 +1,1 @@
+ALTER TABLE `idempotency` ADD `thing_id` char(26) character set ascii collate ascii_bin;
