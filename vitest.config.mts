@@ -25,7 +25,7 @@ export default defineConfig({
       }),
       project('realtime', ['tests/realtime/**/*.test.ts'], { testTimeout: 120_000, hookTimeout: 60_000 }),
       project('reference', ['tests/reference/**/*.test.ts'], { testTimeout: 60_000, hookTimeout: 60_000 }),
-      project('lifecycle', ['tests/lifecycle/**/*.test.ts'], { testTimeout: 180_000, hookTimeout: 300_000, fileParallelism: false }),
+      project('lifecycle', ['tests/lifecycle/**/*.test.ts'], { testTimeout: 400_000, hookTimeout: 400_000, fileParallelism: false }),
       project('repo', ['tests/repo/**/*.test.ts'], { testTimeout: 60_000 }),
     ],
   },

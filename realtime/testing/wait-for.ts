@@ -1,5 +1,5 @@
 /** Waits until `found` gives something other than undefined or false. @throws Error naming `what` after `timeout` ms */
-export async function waitFor<T>(what: string, found: () => T | undefined | false | Promise<T | undefined | false>, timeout = 10_000): Promise<T> {
+export async function waitFor<T>(what: string, found: () => T | undefined | false | Promise<T | undefined | false>, timeout = 30_000): Promise<T> {
   const end = Date.now() + timeout;
   for (;;) {
     const value = await found();

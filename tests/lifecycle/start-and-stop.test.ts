@@ -70,8 +70,8 @@ describe('npm start', () => {
     for (const index of [0, 1, 2, 3]) {
       const before = partsOf(product);
       process.kill(before[index] ?? 0, 'SIGKILL');
-      expect(await waitUntil(() => !partsOf(product).includes(before[index] ?? 0), { timeoutMs: 30_000 })).toBe(true);
-      expect(await waitUntil(() => answers(product), { timeoutMs: 30_000 })).toBe(true);
+      expect(await waitUntil(() => !partsOf(product).includes(before[index] ?? 0), { timeoutMs: 60_000 })).toBe(true);
+      expect(await waitUntil(() => answers(product), { timeoutMs: 60_000 })).toBe(true);
     }
   });
 
@@ -93,7 +93,7 @@ describe('after a kill -9 of the supervisor', () => {
     const parts = partsOf(first);
     first.signal('SIGKILL');
     await first.exited;
-    expect(await waitUntil(() => !parts.some(isAlive), { timeoutMs: 25_000 })).toBe(true);
+    expect(await waitUntil(() => !parts.some(isAlive), { timeoutMs: 60_000 })).toBe(true);
     const second = await startProduct({ root, dataFolder });
     try {
       expect(second.accounts).toEqual(first.accounts);
