@@ -11,6 +11,8 @@ const contactWords = new Set(['lamp', 'relay', 'switch', 'fuse', 'lead']);
 export const isTransistor = (part: NetlistPart): boolean => isFet(part) || isBipolar(part);
 export const isFet = (part: NetlistPart): boolean => part.kind === 'nmos' || part.kind === 'pmos';
 export const isBipolar = (part: NetlistPart): boolean => part.kind === 'npn' || part.kind === 'pnp';
+/** Turned on by light: its base is left open by nature. */
+export const isOptical = (part: NetlistPart): boolean => isBipolar(part) && labelOf(part, 'kind') === 'opto-transistor';
 /** Conducts with its upper terminal at the supply side: P-channel and PNP. */
 export const isUpperPolarity = (part: NetlistPart): boolean => part.kind === 'pmos' || part.kind === 'pnp';
 

@@ -1,6 +1,6 @@
 import type { NetlistPart } from '../netlist';
 import type { Edge, Graph } from './graph';
-import { isInductive, isRemovable, isTransistor, ohmsOf } from './part-nature';
+import { isInductive, isLoad, isOptical, isRemovable, isTransistor, ohmsOf } from './part-nature';
 import type { Control, Sources } from './sources';
 import { terminalsOf, type Terminals } from './terminals';
 import { pathTo, walk, type Step } from './walk';
@@ -39,7 +39,7 @@ const senseOhms = 10;
 
 function referencesOf(graph: Graph, rails: ReadonlySet<string>, gates: ReadonlySet<string>, net: string): ReadonlySet<string> {
   return new Set(walk(graph, net, {
-    through: (edge) => edge.nature === 'joint' || (!rails.has(net) && edge.nature === 'resistor' && ohmsOf(edge.part) <= senseOhms),
+    through: (edge) => edge.nature === 'joint' || (!rails.has(net) && edge.nature === 'resistor' && !isLoad(edge.part) && ohmsOf(edge.part) <= senseOhms),
     stopAt: (reached) => rails.has(reached) || gates.has(reached),
   }).keys());
 }
@@ -113,7 +113,7 @@ function stageOf(graph: Graph, rails: ReadonlySet<string>, fixed: ReadonlySet<st
 
 /** Every transistor as a driver stage, in canonical part order. */
 export function findStages(graph: Graph, parts: readonly NetlistPart[], rails: ReadonlySet<string>, sources: Sources): readonly Stage[] {
-  const transistors = parts.filter(isTransistor);
+  const transistors = parts.filter((part) => isTransistor(part) && !isOptical(part));
   const gates = new Set(transistors.map((part) => terminalsOf(part).control));
   const fixed = supplyRails(graph, sources);
   return transistors.map((transistor) => stageOf(graph, rails, fixed, gates, sources, transistor));

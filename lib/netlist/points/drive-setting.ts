@@ -49,13 +49,21 @@ export function liftedStates(circuit: Circuit): readonly Drive[] {
   }))];
 }
 
+/** Whether something can be hurt by a supply that is off: a gate whose source falls with it, an LED from a rail to a control. */
+function feelsSupplyOff(circuit: Circuit): boolean {
+  const driven = new Set(circuit.sources.controls.flatMap(({ out, back }) => [out, back]).filter((net) => net !== '0'));
+  return circuit.stages.some(({ transistor, references }) => transistor.kind === 'pmos' || (transistor.kind === 'nmos' && !references.has('0')))
+    || circuit.ledBranches.some(({ ends }) => ends.some((net) => driven.has(net)) && !ends.includes('0'));
+}
+
 /**
- * Each supply off in turn while the controls are high: only for circuits with a P-channel switch, whose gate may then
- * stand above its source.
+ * Each supply off in turn while the controls are high, and while they are low: only where that makes a difference, a gate that then stands away
+ * from its source or an LED that a control then drives backwards.
  */
 export function supplyOffStates(circuit: Circuit): readonly Drive[] {
   const { supplies, controls } = circuit.sources;
-  if (!circuit.stages.some((stage) => stage.transistor.kind === 'pmos') || supplies.length + controls.length < 2) return [];
-  const high = Object.fromEntries(controls.map((control) => [control.part.id, setTo(control, 'high')]));
-  return supplies.map((supply): Drive => ({ state: `off ${supply.ref}`, settings: { ...high, [supply.id]: { volts: 0 } } }));
+  if (!feelsSupplyOff(circuit) || supplies.length + controls.length < 2) return [];
+  const all = (level: 'high' | 'low') => Object.fromEntries(controls.map((control) => [control.part.id, setTo(control, level)]));
+  const drives = controls.length === 0 ? [{}] : [all('high'), all('low')];
+  return supplies.flatMap((supply) => drives.map((drive): Drive => ({ state: `off ${supply.ref}`, settings: { ...drive, [supply.id]: { volts: 0 } } })));
 }

@@ -25,6 +25,7 @@ export const cases: readonly RuleCase[] = [
   { name: 'totem pole of two transistors', deck: deck(bare, 'Q2 vbus b gate QN\n*@Q2 kind=NPN', 'Q3 0 b gate QP\n*@Q3 kind=PNP', resistor('R7', 'drv', 'b', '1k'), pin), expect: { outcome: 'pass' } },
   { name: 'pulled up to the supply with an open-drain transistor', deck: deck(bare, resistor('R8', 'vbus', 'gate', '10k'), 'MQ2 gate g2 0 0 NM\n*@MQ2 ref=Q2 kind=NMOS vth_typ=2 rds_on=1', resistor('R6', 'g2', '0', '22k'), resistor('R5', 'drv', 'g2', '100'), pin), expect: { outcome: 'pass' } },
   { name: 'a part that is not examined drives it', deck: deck(bare, 'X1 gate vbus 0 DRIVER\n.subckt DRIVER a b c\nR1 a c 1k\n.ends'), expect: { outcome: 'undetermined' } },
+  { name: 'light drives an optocoupler', deck: deck('V1 vbus 0 12\n*@V1 role=supply', resistor('R1', 'vbus', 'c', '4.7k'), 'Q1 c b 0 NX\n*@Q1 kind=opto-transistor\n.model NX NPN'), expect: { outcome: 'none' } },
   { name: 'no transistor', deck: heaterStage(), expect: { outcome: 'none' } },
   withParameter(leaky, 'thresholdShare', 0.2, { outcome: 'fail', severity: 'caution' }),
   withParameter(unknown, 'assumedThreshold', 0.5, { outcome: 'fail', severity: 'caution' }),

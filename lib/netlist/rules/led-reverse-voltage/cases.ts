@@ -10,6 +10,7 @@ export const cases: readonly RuleCase[] = [
   twelve,
   { name: 'the other half cycle of 12 V AC', deck: alternating(), expect: { outcome: 'fail', severity: 'stop' } },
   { name: 'driven through another rail while the control is low', deck: deck('V1 vbus 0 12\n*@V1 role=supply', control('12', 'role=generator'), resistor('R1', 'drv', 'a', '1k'), led('D1', 'a', 'vbus')), expect: { outcome: 'fail', severity: 'stop', state: 'as drawn' } },
+  { name: 'driven backwards while its rail is off', deck: deck('V1 vbus 0 12\n*@V1 role=supply', 'V2 drv 0 12\n*@V2 role=generator high=12 low=0', resistor('R1', 'vbus', 'a', '1k'), led('D1', 'a', 'drv')), expect: { outcome: 'fail', severity: 'stop', state: 'off V1' } },
   { name: 'just over 5 V', deck: backwards('5.05'), expect: { outcome: 'fail', severity: 'stop' } },
   { name: 'over 5 V at +10 % only', deck: backwards('4.8'), expect: { outcome: 'fail', severity: 'caution' } },
   { name: '4 V', deck: backwards('4'), expect: { outcome: 'pass' } },

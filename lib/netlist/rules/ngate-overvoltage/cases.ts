@@ -22,6 +22,11 @@ const warm: RuleCase = { name: '17 V on a 20 V gate', deck: stage(driveFor(17)),
 
 /** `docs/rules.md` 21; the 20 V limit of a 2N7000 is continuous, ±40 V is for 50 µs (`docs/sources.md` 12.3, 15.8). */
 export const cases: readonly RuleCase[] = [
+  {
+    name: 'a high-side gate whose rail is up while the bus is off',
+    deck: 'V1 bus 0 40\n*@V1 role=supply\nV3 v52 0 52\n*@V3 role=supply\nM1 bus g s s NM\n*@M1 kind=NMOS vds_max=100 vgs_max=20 vth_min=2 vth_max=4 rds_on=0.044 rds_on_spec_vgs=10\nRL s 0 20\n*@RL load=heater\nR1 v52 g 10k\n*@R1 pmax=0.5\nVG pin 0 0\n*@VG role=pin high=5 low=0\nR3 pin b 4.7k\nR4 b 0 47k\nQ1 g b 0 NX\n*@Q1 kind=NPN vceo_max=80\n.model NM NMOS(VTO=3 KP=20)\n.model NX NPN',
+    expect: { outcome: 'fail', severity: 'stop', refs: ['M1'] },
+  },
   { name: '24 V drive', deck: stage('24'), expect: { outcome: 'fail', severity: 'stop', refs: ['M1', 'VG'], says: 'the oxide is rated 20 V', state: 'high' } },
   { name: 'negative drive counts as well', deck: stage('12', '').replace('PULSE(0 12', 'PULSE(-24 12'), expect: { outcome: 'fail', severity: 'stop' } },
   warm,
