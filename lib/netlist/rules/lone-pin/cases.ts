@@ -19,6 +19,8 @@ export const cases: readonly RuleCase[] = [
   { name: 'a gate that nothing reaches', deck: `${supply}\nM1 vcc g 0 0 NM\n*@M1 kind=NMOS vth_min=2\n.model NM NMOS(VTO=3)`, expect: { outcome: 'fail', refs: ['M1'], says: 'M1:G' } },
   { name: 'one end of a capacitor', deck: `${supply}\nC1 vcc tail 100n\n*@C1 vmax=50`, expect: { outcome: 'fail', refs: ['C1'], says: 'C1:2' } },
   { ...hanging, name: 'the same, marked left open', edit: leftOpen('R2', '2'), expect: { outcome: 'pass', says: 'on purpose' } },
+  { name: 'only one pin on 0 V', deck: 'V1 l n 12\n*@V1 role=supply\nR1 l n 10k\n*@R1 pmax=0.25\nR2 n 0 1meg\n*@R2 pmax=0.25', expect: { outcome: 'none' } },
+  { name: 'the base of an optocoupler', deck: `${supply}\nQ1 vcc b 0 NX\n*@Q1 kind=opto-transistor\n.model NX NPN`, expect: { outcome: 'none' } },
   { name: 'a capacitor left open on purpose', deck: `${supply}\nC1 vcc tail 100n\n*@C1 vmax=50`, edit: leftOpen('C1', '2'), expect: { outcome: 'pass' } },
   { name: 'a gate left open on purpose is gate-floating’s business', deck: `${supply}\nM1 vcc g 0 0 NM\n*@M1 kind=NMOS vth_min=2\n.model NM NMOS(VTO=3)`, edit: leftOpen('M1', 'G'), expect: { outcome: 'pass' } },
   joined,

@@ -1,5 +1,5 @@
 import { netWords } from '../../connectivity/net-words';
-import { isInternal, isTransistor } from '../../circuit/part-nature';
+import { isInternal, isOptical, isTransistor } from '../../circuit/part-nature';
 import type { Remedy } from '../../findings/finding';
 import type { Net, Netlist, NetlistPart } from '../../netlist';
 import { pinReference } from '../../connectivity/pin-reference';
@@ -19,12 +19,13 @@ interface Lone {
   readonly pin: string;
 }
 
-/** An earth mark is a connection by itself; the inside of a part is nobody's to join. */
+/** An earth mark is a connection by itself, 0 V is what volts are counted from; light drives an optocoupler's base; the inside of a part is nobody's to join. */
 function loneOf({ netlist }: Input, net: Net): Lone | null {
-  if (net.facts.kind === 'earth') return null;
+  if (net.facts.kind === 'earth' || net.name === '0') return null;
   const part = netlist.parts.find((one) => Object.values(one.pins).includes(net.name));
   const pin = part && Object.keys(part.pins).find((name) => part.pins[name] === net.name);
-  return part && pin !== undefined && !isInternal(part) ? { net, part, pin } : null;
+  if (!part || pin === undefined || isInternal(part) || (isOptical(part) && pin === 'B')) return null;
+  return { net, part, pin };
 }
 
 /** A control pin left open is never meant, so no mark is offered for it. */
@@ -42,7 +43,7 @@ function judge(netlist: Netlist, lone: Lone, leastPins: number): Outcome {
     evidence: [{ entity: net.name, quantity: 'pins', value: net.pins.length, unit: '', source: 'sheet', limit: leastPins, limitSource: 'a net joins at least two pins' }],
   } as const;
   if (part.leftOpen.includes(pin)) return everywhere({ ...base, outcome: 'pass', message: `${reference} is left open on purpose`, evidence: [{ entity: reference, quantity: 'left open', value: true, unit: '', source: 'sheet' }] });
-  const named = net.givenNames.length > 0 || net.name === '0' ? ` on ${netWords(netlist, net.name)}` : '';
+  const named = net.givenNames.length > 0 ? ` on ${netWords(netlist, net.name)}` : '';
   return everywhere({ ...base, outcome: 'fail', message: `${reference}${named} is joined to nothing else`, remedy: remedyOf(lone) });
 }
 
