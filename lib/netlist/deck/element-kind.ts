@@ -27,6 +27,7 @@ export function elementKind(element: DeckElement, facts: ReadFacts, card: ModelC
   const type = card && modelPolarity(card);
   const stated = kindOfWord(facts.kind);
   if (stated && fits(stated, element, type)) return stated;
+  if (isContact(element, facts)) return 'plug-contact';
   if (element.letter === 'V') return sourceKind(element, facts);
   if (element.letter === 'C' && isPolarised(facts)) return 'polarised-capacitor';
   if (element.letter === 'D' && typeof facts.vz === 'number') return 'zener';
@@ -39,6 +40,15 @@ function fits(kind: KindId, element: DeckElement, type: string | undefined): boo
   if (element.letter === 'X') return length >= 2 && length <= element.nodes.length;
   if (type !== undefined && 'MQ'.includes(element.letter) && type !== kind) return false;
   return kindsOfLetter[element.letter]?.includes(kind) ?? false;
+}
+
+/** Ohms up to which an element of a plug is one of its contacts. */
+const contactOhms = 0.1;
+
+/** A contact of a plug that says no more than which plug it is part of. */
+function isContact({ letter, value }: DeckElement, { kind, part_of: of, internal, load }: ReadFacts): boolean {
+  return letter === 'R' && value !== undefined && Math.abs(value) <= contactOhms && typeof of === 'string' && /^[JPX]/i.test(of)
+    && kind === undefined && internal === undefined && load === undefined;
 }
 
 function sourceKind(element: DeckElement, facts: ReadFacts): KindId {

@@ -30,7 +30,7 @@ describe('kinds', () => {
     ['npn', ['Q1 c b e QQ', '.model QQ NPN']], ['pnp', ['Q1 c b e QQ', '.model QQ PNP']], ['npn', ['Q1 c b e QQ', '*@Q1 kind=NPN']],
     ['nmos', ['M1 d g s s MM', '.model MM NMOS']], ['pmos', ['M1 d g s MM', '.model MM VDMOS(pchan)']], ['nmos', ['M1 d g s MM', '.model MM VDMOS(VTO=3)']],
     ['nmos', ['X1 a b c FET', '*@X1 kind=NMOS', ...power]], ['nmos', ['X1 a b c GONE', '*@X1 kind=nmos']],
-    ['removable-lead', ['R1 a b 10m', '*@R1 kind=lead']], ['plug-contact', ['R1 a b 10m', '*@R1 kind=plug part_of=J1']], ['fuse', ['R1 a b 10m', '*@R1 kind=fuse value=2']], ['switch', ['R1 a b 1m', '*@R1 kind=switch']],
+    ['removable-lead', ['R1 a b 10m', '*@R1 kind=lead']], ['plug-contact', ['R1 a b 10m', '*@R1 kind=plug part_of=J1']], ['plug-contact', ['R1 a b 10m', '*@R1 part_of=J1']], ['resistor', ['R1 a b 10k', '*@R1 part_of=J1']], ['fuse', ['R1 a b 10m', '*@R1 kind=fuse value=2']], ['switch', ['R1 a b 1m', '*@R1 kind=switch']],
     ['resistor', ['R1 a b 12', '*@R1 kind=lamp']], ['resistor', ['R1 a b 5m', '*@R1 wire=yes']],
     ['box', ['I1 a b 1m']], ['box', ['X1 a b c FET', ...power]], ['box', ['E1 a b c d 2']], ['box', ['Q1 c b e NOCARD']], ['box', ['X1 a b c FET', '*@X1 kind=driver', ...power]],
     ['resistor', ['R1 a b 1k', '*@R1 kind=NMOS']], ['npn', ['Q1 c b e QQ', '*@Q1 kind=PNP', '.model QQ NPN']],

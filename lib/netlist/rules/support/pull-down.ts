@@ -72,7 +72,7 @@ export function pullDownRemedy({ netlist }: Circuit, stage: Stage, need: PullDow
   const { reference } = stage.terminals;
   const ohms = chooseOhms(stage, net, need);
   const breaks = stage.way.map((edge) => edge.part).filter((part) => isRemovable(part) || part.kind === 'switch');
-  const side = breaks.length > 0 ? `, on the gate’s side of ${listWords([...new Set(breaks.map(leadName))])}` : '';
+  const side = breaks.length > 0 ? `, on the ${stage.terminals.controlPin === 'B' ? 'base' : 'gate'}’s side of ${listWords([...new Set(breaks.map(leadName))])}` : '';
   if (ohms === undefined) return { words: `Keep ${stage.transistor.ref} off with a driver of its own: no single resistor is weak enough for this drive and strong enough for its leakage.` };
   return {
     words: `Add ${say(ohms, 'Ω')} from ${netWords(netlist, net)} to ${netWords(netlist, reference)}${side}: undefined then means off.`,
