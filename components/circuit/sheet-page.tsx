@@ -19,7 +19,7 @@ import { LadderRow } from './ladder-row';
 import { MarginIntro } from './margin-intro';
 import { CircuitLoading } from './page-state';
 import { PeopleOnSheet } from './people-on-sheet';
-import { PhoneSwitch, type PhonePane } from './phone-switch';
+import { PhoneSwitch } from './phone-switch';
 import { planOfSheet } from './plan-of-sheet';
 import { RefusedEdits } from './refused-edits';
 import { RevisionBlock } from './revision-block';
@@ -32,6 +32,7 @@ import { useCircuit, useRevisions, useThreads } from './use-circuit';
 import { useEditor } from './use-editor';
 import { useLiveFindings } from './use-live-findings';
 import { useSheetSession } from './use-sheet-session';
+import { usePhonePane } from './use-phone-pane';
 import { useShownAt } from './use-shown-at';
 
 /** The live sheet: editor, margin and ladder, shared with whoever else has it open. */
@@ -50,7 +51,7 @@ export function SheetPage() {
   const [shown, show] = useShownAt(plan);
   const [selected, select] = useSelectedEntry();
   const [geometry, setGeometry] = useState<SheetGeometry | null>(null);
-  const [pane, setPane] = useState<PhonePane>('drawing');
+  const [pane, setPane] = usePhonePane();
   const [draft, setDraft] = useState<{ readonly anchor: Anchor; readonly words: string } | null>(null);
   const [planning, setPlanning] = useState(false);
   const [listing, setListing] = useState(false);
@@ -60,7 +61,7 @@ export function SheetPage() {
   const actions = useThreadActions(circuitId, state && !state.readOnly ? take : null);
   const refs = useMemo(() => new Set(state?.sheet.parts.filter((part) => state.selection.has(part.id)).map((part) => part.ref)), [state]);
   const lit = useCallback((anchor: MarginAnchor) => (anchor.kind === 'ref' ? refs.has(anchor.ref) : anchor.kind === 'part' ? state?.selection.has(anchor.id) ?? false : false), [refs, state]);
-  const jump = useCallback((anchor: MarginAnchor) => { setPane('drawing'); geometry?.reveal(anchor); }, [geometry]);
+  const jump = useCallback((anchor: MarginAnchor) => { setPane('drawing'); geometry?.reveal(anchor); }, [geometry, setPane]);
 
   const newest = revisions.data?.[0];
   const moved = useMemo(() => (sheet ? movedSince(newest, sheet) : circuit.data?.draft === false ? 'not' : 'electrical'), [sheet, newest, circuit.data?.draft]);

@@ -39,22 +39,23 @@ interface Standing {
 }
 
 /** How far an entry may leave its level to spare a text, px, nearest first. */
-const shifts = [0, -14, 14, -28, 28, -44, 44, -64, 64];
+const shifts = [0, -14, 14, -28, 28, -44, 44, -64, 64, 90, 120];
 
 /** An entry leaves its level this many times at most to spare a symbol or a wire; a text weighs more than all of those. */
 const shiftsForObstacles = 5;
 const aText = 1_000;
 
 /**
- * Moves entries a little up or down within the room between their neighbours, so that their leaders cross no text and, where
- * that is near, no symbol. Order and distances stay. `columnTop` is where the column begins on the canvas.
+ * Moves entries a little up or down, and those below on where there is room, so that their leaders cross no text and, where
+ * that is near, no symbol. Order and least distances stay. `columnTop` is where the column begins on the canvas.
  */
 export function settleTops(entries: readonly Standing[], targets: Targets, columnTop: number, room: number, gap = 6): ReadonlyMap<string, number> {
   const tops = new Map<string, number>();
   let free = 0;
+  let following = entries.reduce((sum, entry) => sum + entry.height, 0) + gap * Math.max(0, entries.length - 1);
   for (const [index, { key, top, height }] of entries.entries()) {
-    const next = entries[index + 1];
-    const highest = Math.max(free, (next ? next.top - gap : Math.max(room, top + height)) - height);
+    following -= height + (index === 0 ? 0 : gap);
+    const highest = Math.max(free, top, room - following - height);
     // An entry below the canvas has no leader: nothing to spare.
     const ends = columnTop + Math.max(free, top) > targets.height ? [] : visibleEnds(targets, key);
     let best = { top: Math.max(free, top), burden: Infinity };

@@ -4,10 +4,11 @@ import { CautionsLine } from '@/components/circuit/cautions-line';
 import { CircuitFrame } from '@/components/circuit/circuit-frame';
 import { useCircuitPlace, useMay } from '@/components/circuit/circuit-context';
 import { CircuitLoading } from '@/components/circuit/page-state';
-import { PhoneSwitch, type PhonePane } from '@/components/circuit/phone-switch';
+import { PhoneSwitch } from '@/components/circuit/phone-switch';
 import { ReadingRow } from '@/components/circuit/reading-row';
 import { signedTo } from '@/components/circuit/signed-state';
 import { useCircuit, useRevisionFindings, useRevisions, useThreads } from '@/components/circuit/use-circuit';
+import { usePhonePane } from '@/components/circuit/use-phone-pane';
 import { useShownAt } from '@/components/circuit/use-shown-at';
 import { SheetViewer } from '@/components/drawing/sheet-viewer';
 import { touchSafeVolts } from '@/components/ladder/ladder-point';
@@ -43,10 +44,10 @@ export function RevisionPage({ letter, tab = 'revisions' }: { readonly letter: s
   const [shown, show] = useShownAt(revision?.holdPoints ?? []);
   const [geometry, setGeometry] = useState<SheetGeometry | null>(null);
   const [selected, select] = useSelectedEntry();
-  const [pane, setPane] = useState<PhonePane>('drawing');
+  const [pane, setPane] = usePhonePane();
   const entries = useMemo(() => marginEntries(findings.data ?? [], threads.data ?? []), [findings.data, threads.data]);
   const lit = useCallback((anchor: MarginAnchor) => entries.some((entry) => entry.key === selected && entry.anchor === anchor), [entries, selected]);
-  const jump = useCallback((anchor: MarginAnchor) => { setPane('drawing'); geometry?.reveal(anchor); }, [geometry]);
+  const jump = useCallback((anchor: MarginAnchor) => { setPane('drawing'); geometry?.reveal(anchor); }, [geometry, setPane]);
 
   if (!circuit.data || !revisions.data || !revision) {
     return <CircuitLoading error={circuit.error ?? revisions.error ?? (revisions.data && !revision ? new Error(letter) : null)} onRetry={() => { void circuit.refetch(); void revisions.refetch(); }} />;
