@@ -9,6 +9,17 @@ import type { Health } from '@/lib/schemas/health';
 type PartState = Health['database'];
 const patience = 2_000;
 
+/** Fails when an answer takes longer than people wait for it: a part that hangs is down. */
+async function inTime<T>(answer: Promise<T>): Promise<T> {
+  let timer: NodeJS.Timeout | undefined;
+  const late = new Promise<never>((_, reject) => { timer = setTimeout(() => reject(new Error('no answer in time')), patience); });
+  try {
+    return await Promise.race([answer, late]);
+  } finally {
+    clearTimeout(timer);
+  }
+}
+
 /** True when something listens at an address. */
 function listens(address: string, port: number): Promise<boolean> {
   return new Promise((resolve) => {
@@ -37,7 +48,7 @@ const up = (answers: boolean): PartState => (answers ? 'ok' : 'down');
 export async function readHealth(db: Database): Promise<Health> {
   const env = environment();
   const [database, realtime, storage, mail] = await Promise.all([
-    ping(db).then(() => up(true), () => up(false)), rooms().healthy().then(up), reachable(env.S3_ENDPOINT), reachable(env.SMTP_URL),
+    inTime(ping(db)).then(() => up(true), () => up(false)), rooms().healthy().then(up), reachable(env.S3_ENDPOINT), reachable(env.SMTP_URL),
   ]);
   const parts = { database, realtime, engine: engineState(), storage, mail };
   return { status: Object.values(parts).includes('down') ? 'down' : 'ok', ...parts };

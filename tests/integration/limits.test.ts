@@ -1,7 +1,8 @@
 import { afterAll, beforeAll, expect, it } from 'vitest';
 import { databaseErrorCode, isOutage } from '@/db/errors';
-import { openDatabase } from '@/db/client';
+import { openDatabase, type Database } from '@/db/client';
 import { ping } from '@/db/queries/durability';
+import { readHealth } from '@/lib/http/health';
 import { checkDeck, getCircuit, getFindings } from '@/lib/http/operations/circuits';
 import { getHealth, whoAmI } from '@/lib/http/operations/people';
 import { openThread } from '@/lib/http/operations/review';
@@ -58,6 +59,11 @@ it('refuses bodies that are too large before reading them whole', async () => {
   const body = { anchor: { kind: 'spot', x: 0, y: 0 }, body: 'x'.repeat(70_000) };
   expect(await world.call(here.member, openThread, { ...at(here.circuit), body })).toMatchObject({ status: 413, body: { code: 'too-large' } });
   expect(await world.call(here.member, checkDeck, { body: { deck: 'x'.repeat(2_000_000) } })).toMatchObject({ status: 413 });
+});
+
+it('says within seconds that a database is down which takes the question and never answers', async () => {
+  const silent = { execute: () => new Promise(() => undefined) } as unknown as Database;
+  expect(await readHealth(silent)).toMatchObject({ status: 'down', database: 'down', realtime: 'ok' });
 });
 
 it('knows an unreachable database for what it is, and says so in health', async () => {

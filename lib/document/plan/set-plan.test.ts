@@ -24,6 +24,7 @@ describe('the power-up plan', () => {
     ['two of one name', [{ name: 'A', volts: 1, amps: 1 }, { name: ' A ', volts: 2, amps: 1 }], 'called A', 1],
     ['a point below the one before it', [{ name: 'A', volts: 5, amps: 1 }, { name: 'B', volts: 2, amps: 1 }], 'ascend', 1],
     ['a source that is not there', [{ name: 'A', volts: 5, amps: 1, source: 'V9' }], 'no part V9', 0],
+    ['a source that is none', [{ name: 'A', volts: 5, amps: 1, source: 'R1' }], 'R1 is not a source', 0],
     ['no volts', [{ name: 'A', volts: 0, amps: 1 }], 'Volts', 0],
     ['no amps', [{ name: 'A', volts: 1, amps: 0 }], 'current limit', 0],
     ['no name', [{ name: '  ', volts: 1, amps: 1 }], 'needs a name', 0],

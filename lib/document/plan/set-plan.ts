@@ -16,6 +16,9 @@ export type PlanAnswer =
   /** Why not, and at which row and field. */
   | { readonly ok: false; readonly reason: string; readonly index: number; readonly field: PlanField };
 
+/** Kinds whose volts a hold point can raise. */
+const sourceKinds: ReadonlySet<string> = new Set(['dc-source', 'dc-supply', 'signal-generator', 'ac-mains']);
+
 /**
  * Replaces the power-up plan. Points ascend by volts and have unique names; a scenario not yet known is made, empty; a
  * point that keeps its name keeps its id. Refuses with the reason and the row, and changes nothing then.
@@ -31,6 +34,7 @@ export function setPlan(sheet: Sheet, points: readonly PlannedPoint[], newId: ()
     if (last && volts <= last.volts) return no('volts', `${name} is not above ${last.name}. Hold points ascend by volts.`);
     const part = source === undefined ? undefined : sheet.parts.find((one) => one.ref === source);
     if (source !== undefined && !part) return no('source', `The sheet has no part ${source}.`);
+    if (part && !sourceKinds.has(part.kind)) return no('source', `${part.ref} is not a source. A hold point raises the volts of one.`);
     if (scenario !== undefined && !scenarios.some((one) => one.name === scenario)) {
       const made = scenarioRecordSchema.safeParse({ id: newId(), name: scenario, ambient: 25, values: {} });
       if (!made.success) return no('scenario', 'A scenario needs a name of one line, at most 120 characters.');

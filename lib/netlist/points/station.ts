@@ -39,10 +39,16 @@ export function drawnVolts(part: NetlistPart): number | undefined {
 
 function holdPointStation(circuit: Circuit, point: HoldPoint): Station {
   const scenario = scenarioOf(circuit, point.scenario);
-  const power = point.source === undefined ? planSource(circuit) : circuit.partByRef(point.source) ?? null;
+  const power = point.source === undefined ? planSource(circuit) : namedSource(circuit, point.source);
   const settings = scenarioSettings(circuit, scenario);
   if (power) settings[power.id] = { ...settings[power.id], volts: point.volts, amps: point.amps };
   return { holdPoint: point.name, scenario: point.scenario ?? null, volts: point.volts, ambient: scenario?.ambient ?? roomTemperature, power, settings };
+}
+
+/** The source that a plan names; null for a part that is none, whose volts nothing would follow. */
+function namedSource(circuit: Circuit, ref: string): NetlistPart | null {
+  const part = circuit.partByRef(ref);
+  return part && isVoltageSource(part) ? part : null;
 }
 
 /** The source a plan raises when it names none: the only one whose role is supply or mains. */
