@@ -1,11 +1,14 @@
 import { nearestUp } from '../../series/preferred-values';
 import type { Stage } from '../../circuit/stages';
 import { seriesOn } from '../../circuit/stages';
+import { quantityOf } from '../../circuit/part-facts';
+import type { NetlistPart } from '../../netlist';
 import type { Remedy } from '../../findings/finding';
 import { voltsOf, type RunPoint } from '../../points/point-set';
 import type { Outcome, RuleInput } from '../rule';
 import { atPoint, atStation, missingFact } from './outcome';
 import { ratingOf } from './rating';
+import { powerRating } from './resistor-heat';
 import { crossingEvidence, crossingVolts, judgeStress, refusalWords, stressEvidence, type Measure } from './stress';
 import { placeWords, say } from './words';
 
@@ -24,6 +27,18 @@ function isForward({ terminals, transistor }: Stage, point: RunPoint): boolean {
   return transistor.kind === 'nmos' ? volts > 0 : volts < 0;
 }
 
+const clampWatts = 0.5;
+/** Share of a rating that a proposed part is used to (common practice, no source). */
+const usedShare = 0.6;
+
+/** Whether a gate resistor and a zener of `clampWatts` stand the volts that the clamp leaves over, without end. */
+function takesTheRest(resistor: NetlistPart, excess: number, vz: number): boolean {
+  const ohms = quantityOf(resistor, 'value') ?? 0;
+  if (ohms < 100 || excess <= 0) return false;
+  const rated = powerRating(resistor)?.value ?? 0.125;
+  return excess ** 2 / ohms <= rated * usedShare && (vz * excess) / ohms <= clampWatts * usedShare;
+}
+
 /** A zener from gate to source below the caution limit, where a gate resistor can take what is left; words otherwise. */
 function remedyOf(stage: Stage, point: RunPoint, rated: number, share: number): Remedy {
   if (!isForward(stage, point)) return { words: `Keep the drive on one side of ${stage.transistor.ref}’s source, or clamp the gate both ways with two zeners in series.` };
@@ -31,12 +46,16 @@ function remedyOf(stage: Stage, point: RunPoint, rated: number, share: number): 
   const resistor = seriesOn(stage)[0];
   if (vz === undefined) return { words: 'Divide the drive down.' };
   const words = `Clamp the gate with a ${say(vz, 'V')} zener to the source, behind a series resistor`;
-  if (!resistor || Number(resistor.part.facts.value ?? 0) < 100) return { words: `${words} of ${say(nearestUp(470, 'E12'), 'Ω')} or more, or divide the drive down.` };
+  const drive = Math.max(...(stage.control ? [stage.control.high, stage.control.low] : []).map(Math.abs), Math.abs(gateVolts(stage)(point) ?? 0));
+  if (!resistor || !takesTheRest(resistor.part, drive - vz, vz)) {
+    const ohms = nearestUp(Math.max(470, (drive - vz) ** 2 / (clampWatts * usedShare) * 2), 'E12');
+    return { words: `${words} of ${say(ohms, 'Ω')} or more, or divide the drive down.` };
+  }
   const { control, reference } = stage.terminals;
   const n = stage.transistor.kind === 'nmos';
   return {
     words: `${words} (${resistor.part.ref}).`,
-    edits: [{ edit: 'add part', kind: 'zener', facts: { vz, pmax: 0.5 }, pins: n ? { A: reference, K: control } : { A: control, K: reference } }],
+    edits: [{ edit: 'add part', kind: 'zener', facts: { vz, pmax: clampWatts }, pins: n ? { A: reference, K: control } : { A: control, K: reference } }],
   };
 }
 
