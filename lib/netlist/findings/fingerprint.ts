@@ -15,11 +15,10 @@ export function targetKey(rule: string, version: number, target: Target): string
 }
 
 /**
- * Identity of a finding between revisions: rule, its version and the sorted stable ids with their roles. Never text,
- * position or display name of a part. 32 hexadecimal digits.
+ * Identity of a finding between revisions, from its `targetKey`: rule, its version and the sorted stable ids with their
+ * roles. Never text, position or display name of a part. 32 hexadecimal digits.
  */
-export function fingerprintOf(rule: string, version: number, target: Target): string {
-  const key = targetKey(rule, version, target);
+export function fingerprintOf(key: string): string {
   const before = known.get(key);
   if (before !== undefined) return before;
   const fingerprint = bytesToHex(sha256(utf8ToBytes(key))).slice(0, 32);

@@ -40,10 +40,10 @@ function milderBelow(worst: Placed, all: readonly Placed[], stations: readonly S
   }];
 }
 
-function toFinding(rule: Pick<Rule, 'id' | 'version'>, all: readonly Placed[], stations: readonly Station[]): Collected {
-  const worst = [...all].sort(compare)[0]!;
+function toFinding(rule: Pick<Rule, 'id' | 'version'>, key: string, all: readonly Placed[], stations: readonly Station[]): Collected {
+  const worst = all.length === 1 ? all[0]! : [...all].sort(compare)[0]!;
   const { outcome } = worst;
-  const fingerprint = fingerprintOf(rule.id, rule.version, outcome.target);
+  const fingerprint = fingerprintOf(key);
   const station = stations[worst.place];
   const finding: Finding = {
     id: fingerprint,
@@ -76,5 +76,5 @@ export function collect(rule: Pick<Rule, 'id' | 'version'>, outcomes: readonly O
     if (group) group.push({ outcome, place });
     else groups.set(key, [{ outcome, place }]);
   }
-  return [...groups.values()].map((group) => toFinding(rule, group, stations));
+  return [...groups].map(([key, group]) => toFinding(rule, key, group, stations));
 }
