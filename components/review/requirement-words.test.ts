@@ -32,6 +32,15 @@ describe('requirementRows', () => {
     expect(reasonsAgainst(rows, 'proof').map((reason) => reason.id)).toEqual(['contributor']);
   });
 
+  it('names first, at every hold point, that the revision is not under review', () => {
+    for (const state of ['cut', 'superseded', 'withdrawn'] as const) {
+      const rows = requirementRows({ ...revision, state }, signer);
+      expect(rows[0]).toMatchObject({ id: 'not-in-review', words: 'Under review', worst: 'not satisfied' });
+      expect(reasonsAgainst(rows, 'proof').map((reason) => reason.id)).toEqual(['not-in-review']);
+    }
+    expect(requirementRows(revision, signer)[0]).toMatchObject({ id: 'not-in-review', worst: 'satisfied' });
+  });
+
   it('wants a sign-in of the last 12 hours', () => {
     const rows = requirementRows(revision, { ...signer, now: new Date('2026-03-13T20:00:01Z') });
     expect(reasonsAgainst(rows, 'proof').map((reason) => reason.id)).toEqual(['sign-in-again']);

@@ -1,5 +1,5 @@
 import { counted } from '@/components/ui/counted';
-import type { Requirement, Revision } from '@/lib/schemas/revision';
+import type { Requirement, Revision, RevisionState } from '@/lib/schemas/revision';
 
 export type Result = Requirement['result'];
 
@@ -14,6 +14,7 @@ export interface RequirementRow {
 }
 
 const words: Readonly<Record<string, string>> = {
+  'not-in-review': 'Under review',
   'newer-revision': 'No newer one in review',
   'stale-hash': 'The hash sent is the hash stored',
   contributor: 'You made no part of it',
@@ -26,7 +27,7 @@ const words: Readonly<Record<string, string>> = {
   'lifted-lead': 'Lifted leads: run at the cut',
 };
 
-const order = ['newer-revision', 'stale-hash', 'contributor', 'sign-in-again', 'open-stop', 'rule-error', 'must-answer', 'objection', 'which-source', 'lifted-lead'];
+const order = ['not-in-review', 'newer-revision', 'stale-hash', 'contributor', 'sign-in-again', 'open-stop', 'rule-error', 'must-answer', 'objection', 'which-source', 'lifted-lead'];
 
 /** How bad a result is; what is worst decides. */
 const weight: Readonly<Record<Result, number>> = { satisfied: 0, 'not applicable': 0, overridden: 1, 'not satisfied': 3, error: 2 };
@@ -40,6 +41,11 @@ function worstOf(results: readonly { readonly result: Result }[]): Result {
   return results.reduce<Result>((worst, { result }) => (weight[result] > weight[worst] ? result : worst), results[0]?.result ?? 'not applicable');
 }
 
+/** Whether a revision can be signed at all as its review stands: asked for, not superseded, its sign-off not withdrawn. */
+export function underReview({ state }: Revision): boolean {
+  return state === 'in review' || state === 'changes asked' || state === 'signed off';
+}
+
 /** What only the signer's own session and part in the drawing decide; each null while unknown. */
 export interface SignerFacts {
   readonly contributor: boolean | null;
@@ -47,11 +53,21 @@ export interface SignerFacts {
   readonly now: Date;
 }
 
+const reviewWords: Readonly<Record<RevisionState, string>> = {
+  cut: 'cut; its maker has not asked for review yet',
+  'in review': 'review was asked for',
+  'changes asked': 'review was asked for',
+  'signed off': 'review was asked for',
+  superseded: 'superseded by a newer revision',
+  withdrawn: 'its sign-off was withdrawn; a new revision is reviewed afresh',
+};
+
 const freshFor = 12 * 3_600_000;
 
 function restsOn(id: string, revision: Revision, signer: SignerFacts, refs: readonly string[], worst: Result): string {
   const named = [...new Set(refs)].join(', ');
   switch (id) {
+    case 'not-in-review': return reviewWords[revision.state];
     case 'newer-revision': return worst === 'satisfied' ? `${revision.letter}; none newer is in review` : `${named} is in review`;
     case 'contributor': return `made by ${revision.contributors.map((person) => person.name).join(', ') || 'nobody known'}`;
     case 'sign-in-again': return worst === 'satisfied' ? 'this session' : 'sign in again, then come back';
@@ -76,6 +92,7 @@ export function requirementRows(revision: Revision, signer: SignerFacts): readon
   const own = (id: string, result: Result): readonly Requirement[] => points.map((holdPoint) => ({ id, holdPoint, result, refs: [] }));
   const fresh = signer.signedInAt === null ? null : signer.now.getTime() - new Date(signer.signedInAt).getTime() <= freshFor;
   const all: readonly Requirement[] = [
+    ...own('not-in-review', underReview(revision) ? 'satisfied' : 'not satisfied'),
     ...revision.requirements.map((requirement) => (requirement.id === 'stale-hash' && requirement.result === 'not applicable' ? { ...requirement, result: 'satisfied' as const } : requirement)),
     ...(signer.contributor === null ? [] : own('contributor', signer.contributor ? 'not satisfied' : 'satisfied')),
     ...(fresh === null ? [] : own('sign-in-again', fresh ? 'satisfied' : 'not satisfied')),

@@ -15,7 +15,7 @@ export const codes = {
   'hold-point-unknown': { status: 422, title: 'The plan has no such hold point.', advice: 'Choose a hold point of this revision.' },
   'key-reused': { status: 422, title: 'This idempotency key was used for another request.', advice: 'Use a new key for a new request.' },
   'sheet-moved': { status: 409, title: 'The sheet has moved on.', advice: 'Look at the newest changes, then try again.' },
-  'not-in-review': { status: 409, title: 'This revision is not under review.', advice: 'Its maker can ask for review.' },
+  'not-in-review': { status: 409, title: 'This revision is not under review.', advice: 'Its maker asks for review of it, or cuts a new revision and asks for that.' },
   'newer-revision': { status: 409, title: 'A newer revision is under review.', advice: 'Open the newer revision.' },
   'stale-hash': { status: 409, title: 'This is not the drawing you looked at.', advice: 'Reload the revision and look at it again.' },
   'open-stop': { status: 409, title: 'A stop is open at or below this hold point.', advice: 'The maker removes its cause and cuts a new revision.' },
