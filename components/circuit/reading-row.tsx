@@ -1,12 +1,14 @@
 'use client';
 import { ladderPoints } from '@/components/ladder/ladder-point';
+import { marginEntries } from '@/components/margin/margin-entry';
+import { stopFlags } from '@/components/margin/stop-flags';
 import { Moment } from '@/components/ui/moment';
 import { shortName } from '@/components/ui/initials';
+import type { Finding } from '@/lib/netlist/findings/finding';
 import type { Revision } from '@/lib/schemas/revision';
 import { LadderRow } from './ladder-row';
 import { RevisionBlock } from './revision-block';
 import { signedState } from './signed-state';
-import type { LadderFlag } from '@/components/ladder/ladder-state';
 import type { ReactNode } from 'react';
 
 interface ReadingRowProps {
@@ -14,12 +16,13 @@ interface ReadingRowProps {
   readonly revision: Revision;
   readonly shown: string | null;
   readonly onShow: (name: string) => void;
-  readonly flags?: readonly LadderFlag[];
+  /** What was stored at the cut; undefined while it loads. */
+  readonly findings: readonly Finding[] | undefined;
   readonly act: ReactNode;
 }
 
 /** The ladder row of a page that is about one revision. */
-export function ReadingRow({ revisions, revision, shown, onShow, flags = [], act }: ReadingRowProps) {
+export function ReadingRow({ revisions, revision, shown, onShow, findings = [], act }: ReadingRowProps) {
   const signed = signedState(revisions, revision.letter, false, new Date());
   return (
     <LadderRow
@@ -28,7 +31,7 @@ export function ReadingRow({ revisions, revision, shown, onShow, flags = [], act
       shown={shown}
       onShow={onShow}
       signed={signed}
-      flags={flags}
+      flags={stopFlags(marginEntries(findings, []), revision.holdPoints)}
       act={act}
     />
   );

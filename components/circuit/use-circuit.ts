@@ -45,6 +45,15 @@ export function useThreads(circuit: string, enabled: boolean) {
   });
 }
 
+/** What fails on the committed sheet, checked by the server: for a page that does not have the sheet open. */
+export function useSheetFindings(circuit: string, enabled: boolean) {
+  return useQuery({
+    queryKey: queryKeys.sheetFindings(circuit),
+    enabled,
+    queryFn: async ({ signal }) => (await callApi(`/api/circuits/${circuit}/findings`, { answer: findingList, signal })).findings,
+  });
+}
+
 /** What the checks said at the cut. They never change. */
 export function useRevisionFindings(revision: string | undefined) {
   return useQuery({

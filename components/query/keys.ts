@@ -4,6 +4,8 @@ export const queryKeys = {
   members: (bench: string) => ['members', bench] as const,
   circuit: (id: string) => ['circuit', id] as const,
   threads: (circuit: string) => ['circuit', circuit, 'threads'] as const,
+  /** What the checks say of the committed sheet. */
+  sheetFindings: (circuit: string) => ['circuit', circuit, 'findings'] as const,
   revisions: (circuit: string) => ['circuit', circuit, 'revisions'] as const,
   revision: (id: string) => ['revision', id] as const,
   revisionFindings: (id: string) => ['revision', id, 'findings'] as const,

@@ -54,7 +54,7 @@ export function AskPage({ letter }: { readonly letter: string }) {
       tab="revisions"
       letters={revisions.data.map((one) => one.letter)}
       back={{ href: `/circuits/${circuitId}/revisions/${letter}`, words: `Back to revision ${letter}` }}
-      ladder={<ReadingRow revisions={revisions.data} revision={revision} shown={shown} onShow={show} act={<p><b className="block font-medium text-silk">{revisionWords(revision, now)}</b>{counted(revision.counts.stop, 'stop')}, {counted(revision.counts.caution, 'caution')} stored</p>} />}
+      ladder={<ReadingRow revisions={revisions.data} revision={revision} shown={shown} onShow={show} findings={findings.data} act={<p><b className="block font-medium text-silk">{revisionWords(revision, now)}</b>{counted(revision.counts.stop, 'stop')}, {counted(revision.counts.caution, 'caution')} stored</p>} />}
       cautions={volts > touchSafeVolts ? <CautionsLine volts={volts} /> : null}
       status={<StatusStrip lamp="caution" state={revisionWords(revision, now)} right={<span>Exactly {letter} is sent, hash <span className="figure">{shortHash(revision.contentHash)}</span></span>} />}
     >

@@ -17,7 +17,6 @@ import { Margin } from '@/components/margin/margin';
 import { MarginProvider } from '@/components/margin/margin-context';
 import { marginEntries } from '@/components/margin/margin-entry';
 import type { MarginAnchor, SheetGeometry } from '@/components/margin/sheet-geometry';
-import { stopFlags } from '@/components/margin/stop-flags';
 import { useSelectedEntry } from '@/components/margin/use-selected-entry';
 import { useThreadActions } from '@/components/margin/use-thread-actions';
 import { StatusStrip } from '@/components/shell/status-strip';
@@ -68,7 +67,7 @@ export function RevisionPage({ letter, tab = 'revisions' }: { readonly letter: s
       tab={tab}
       letters={revisions.data.map((one) => one.letter)}
       back={{ href: `/circuits/${circuitId}/revisions`, words: 'Back to the revisions' }}
-      ladder={<ReadingRow revisions={revisions.data} revision={revision} shown={shown} onShow={show} flags={stopFlags(entries, revision.holdPoints)} act={<RevisionAct revision={revision} />} />}
+      ladder={<ReadingRow revisions={revisions.data} revision={revision} shown={shown} onShow={show} findings={findings.data} act={<RevisionAct revision={revision} />} />}
       cautions={point && point.volts > touchSafeVolts ? <CautionsLine volts={point.volts} /> : null}
       foot={<><PhoneSwitch pane={pane} count={entries.length} onPane={setPane} /><section aria-label="Next step" className="flex-none border-t border-edge bg-panel p-2.5 empty:hidden tablet:hidden"><RevisionAct revision={revision} full /></section></>}
       status={<StatusStrip lamp={to ? 'ok' : 'caution'} state={revisionWords(revision, now)} notes={[<>Checked at the cut, <Moment at={revision.cutAt} form="medium" /></>, person ? null : 'Read only']} right={<span>Revision {letter}, hash <span className="figure">{shortHash(revision.contentHash)}</span></span>} />}

@@ -9,9 +9,11 @@ import { CircuitLoading } from '@/components/circuit/page-state';
 import { RevisionBlock } from '@/components/circuit/revision-block';
 import { signedState } from '@/components/circuit/signed-state';
 import { draftWords } from '@/components/circuit/draft-words';
-import { useCircuit, useRevisions } from '@/components/circuit/use-circuit';
+import { useCircuit, useRevisionFindings, useRevisions, useSheetFindings } from '@/components/circuit/use-circuit';
 import { useShownAt } from '@/components/circuit/use-shown-at';
 import { ladderPoints, touchSafeVolts } from '@/components/ladder/ladder-point';
+import { marginEntries } from '@/components/margin/margin-entry';
+import { stopFlags } from '@/components/margin/stop-flags';
 import { StatusStrip } from '@/components/shell/status-strip';
 import { Button } from '@/components/ui/button';
 import { ButtonLink } from '@/components/ui/button-link';
@@ -29,13 +31,16 @@ export function RevisionsPage() {
   const circuit = useCircuit(circuitId);
   const revisions = useRevisions(circuitId);
   const acts = useReviewActs(circuitId);
+  const newest = revisions.data?.[0];
+  const edited = circuit.data !== undefined && revisions.data !== undefined && (circuit.data.draft || newest === undefined);
+  const stored = useRevisionFindings(edited ? undefined : newest?.id);
+  const current = useSheetFindings(circuitId, edited && person !== null);
   const [cutting, setCutting] = useState(false);
   const [shown, show] = useShownAt(circuit.data?.holdPoints ?? []);
   if (!circuit.data || !revisions.data) {
     return <CircuitLoading error={circuit.error ?? revisions.error} onRetry={() => { void circuit.refetch(); void revisions.refetch(); }} />;
   }
   const { title, holdPoints, draft, seq } = circuit.data;
-  const newest = revisions.data[0];
   const moved = newest !== undefined && draft;
   const letter = nextRevisionLetter(newest?.letter ?? null);
   const objections = newest?.objections ?? [];
@@ -47,7 +52,7 @@ export function RevisionsPage() {
       under={under}
       tab="revisions"
       letters={revisions.data.map((revision) => revision.letter)}
-      ladder={<LadderRow block={<RevisionBlock letter={null} title={under} />} points={ladderPoints(holdPoints)} shown={shown} onShow={show} signed={signedState(revisions.data, null, draft, new Date())} flags={[]} act={may('cut a revision') ? <><p><b className="block font-medium text-silk">{newest && !moved ? 'Nothing changed since' : 'The sheet is a draft'}</b>{newest && !moved ? `${newest.letter} is the sheet as it is` : `Cut ${letter}, then ask for review`}</p><Button tone="primary" icon="cut" className="self-start" onClick={() => setCutting(true)}>Cut revision {letter}</Button></> : <p><b className="block font-medium text-silk">{under}</b>A peer’s opinion of each drawing</p>} />}
+      ladder={<LadderRow block={<RevisionBlock letter={null} title={under} />} points={ladderPoints(holdPoints)} shown={shown} onShow={show} signed={signedState(revisions.data, null, draft, new Date())} flags={stopFlags(marginEntries((edited ? current.data : stored.data) ?? [], []), holdPoints)} act={may('cut a revision') ? <><p><b className="block font-medium text-silk">{newest && !moved ? 'Nothing changed since' : 'The sheet is a draft'}</b>{newest && !moved ? `${newest.letter} is the sheet as it is` : `Cut ${letter}, then ask for review`}</p><Button tone="primary" icon="cut" className="self-start" onClick={() => setCutting(true)}>Cut revision {letter}</Button></> : <p><b className="block font-medium text-silk">{under}</b>A peer’s opinion of each drawing</p>} />}
       cautions={volts > touchSafeVolts ? <CautionsLine volts={volts} /> : null}
       status={<StatusStrip lamp="ok" state={`${revisions.data.length} ${revisions.data.length === 1 ? 'revision' : 'revisions'}`} right="A sign-off covers one revision, never the edited sheet" />}
     >

@@ -23,7 +23,7 @@ import { ReasonDialog } from './reason-dialog';
 import { RefusedPanel } from './refused-panel';
 import { HoldPointKeys, RequirementList } from './requirement-list';
 import { RequirementTable } from './requirement-table';
-import { reasonsAgainst, requirementRows } from './requirement-words';
+import { reasonsAgainst, requirementRows, underReview } from './requirement-words';
 import { revisionWords, revisionWordsWithin, shortHash } from './revision-words';
 import { SignForm } from './sign-form';
 import { SignOffHistory } from './sign-off-history';
@@ -55,7 +55,7 @@ export function SignOffPage({ letter }: { readonly letter: string }) {
   });
   const points = revision.holdPoints;
   const blocked = points.findIndex((point) => reasonsAgainst(rows, point.name).length > 0);
-  const open = revision.state === 'in review' || revision.state === 'changes asked' || revision.state === 'signed off';
+  const open = underReview(revision);
   const free = blocked < 0 ? points.length : blocked;
   const signed = new Set(revision.signOffs.filter((signOff) => stands(signOff, now)).map((signOff) => signOff.holdPoint));
   const suggested = points.slice(0, free).filter((point) => !signed.has(point.name)).at(-1) ?? points[0];
@@ -74,7 +74,7 @@ export function SignOffPage({ letter }: { readonly letter: string }) {
       tab="revisions"
       letters={revisions.data.map((one) => one.letter)}
       back={{ href: `/circuits/${circuitId}/revisions/${letter}`, words: `Back to revision ${letter}` }}
-      ladder={<div className="max-tablet:hidden"><ReadingRow revisions={revisions.data} revision={revision} shown={holdPoint} onShow={setChosen} act={<p><b className="block font-medium text-silk">{revisionWords(revision, now)}</b>{revision.reviewers.length > 0 ? `asked: ${revision.reviewers.map((one) => one.name).join(', ')}` : 'any mentor who made no part of it'}</p>} /></div>}
+      ladder={<div className="max-tablet:hidden"><ReadingRow revisions={revisions.data} revision={revision} shown={holdPoint} onShow={setChosen} findings={findings.data} act={<p><b className="block font-medium text-silk">{revisionWords(revision, now)}</b>{revision.reviewers.length > 0 ? `asked: ${revision.reviewers.map((one) => one.name).join(', ')}` : 'any mentor who made no part of it'}</p>} /></div>}
       cautions={point && point.volts > touchSafeVolts ? <CautionsLine volts={point.volts} /> : null}
       status={<StatusStrip lamp={revision.state === 'signed off' ? 'ok' : 'caution'} state={revisionWords(revision, now)} notes={[`${counted(revision.counts.stop, 'stop')}, ${counted(revision.counts.caution, 'caution')} stored at the cut`]} right={<span>Signing covers exactly {letter}, hash <span className="figure">{shortHash(revision.contentHash)}</span></span>} />}
     >
