@@ -132,8 +132,9 @@ function sign(model: Model, { who, revision, point, foreignHash }: Extract<Actio
   if (row.contributors.includes(who) || model.everMakers.includes(who)) return 'contributor';
   const signed = standing(model, revision);
   if (!foreignHash && signed.some((each) => each.point === point && each.by === who)) return 'repeat';
-  if (!row.asked || stateOf(model, revision) === 'withdrawn') return 'not-in-review';
+  if (!row.asked) return 'not-in-review';
   if (newerAsked(model, revision)) return 'newer-revision';
+  if (stateOf(model, revision) === 'withdrawn') return 'not-in-review';
   if (foreignHash) return 'stale-hash';
   if (row.stopFrom !== null && row.stopFrom <= (plan[point]?.volts ?? 0)) return 'open-stop';
   if (objected(model)) return 'objection';
