@@ -17,12 +17,6 @@ export function revisionWords(revision: Revision, now: Date): string {
   return to ? `Signed off to ${voltsWords(to.volts)}` : stateWords[revision.state];
 }
 
-/** The same in the middle of a sentence; units keep their case. */
-export function revisionWordsWithin(revision: Revision, now: Date): string {
-  const words = revisionWords(revision, now);
-  return words.charAt(0).toLowerCase() + words.slice(1);
-}
-
 /** Why a sign-off no longer counts; null while it does. */
 export function voidWords(signOff: SignOff, now: Date): string | null {
   if (stands(signOff, now)) return null;

@@ -24,7 +24,7 @@ import { RefusedPanel } from './refused-panel';
 import { HoldPointKeys, RequirementList } from './requirement-list';
 import { RequirementTable } from './requirement-table';
 import { reasonsAgainst, requirementRows, underReview } from './requirement-words';
-import { revisionWords, revisionWordsWithin, shortHash } from './revision-words';
+import { revisionWords, shortHash } from './revision-words';
 import { SignForm } from './sign-form';
 import { SignOffHistory } from './sign-off-history';
 import { useReviewActs } from './use-review-acts';
@@ -64,7 +64,7 @@ export function SignOffPage({ letter }: { readonly letter: string }) {
   const point = points[index];
   const mayObject = may('ask for changes') || revision.reviewers.some((one) => one.id === person.id);
   const maySign = may('sign off') || mayObject;
-  const refused = !open ? `${letter} is ${revisionWordsWithin(revision, now)}` : !may('sign off') ? 'a mentor who made no part of it signs' : holdPoint !== null && signed.has(holdPoint) ? 'this hold point is signed off' : index >= free ? reasonsAgainst(rows, holdPoint ?? '')[0]?.words.toLowerCase().replace(/^/, 'against it: ') ?? 'a hold point below is refused' : null;
+  const refused = !open ? `${letter} is not under review` : !may('sign off') ? 'a mentor who made no part of it signs' : holdPoint !== null && signed.has(holdPoint) ? 'this hold point is signed off' : index >= free ? reasonsAgainst(rows, holdPoint ?? '')[0]?.words.toLowerCase().replace(/^/, 'against it: ') ?? 'a hold point below is refused' : null;
   const undetermined = (findings.data ?? []).filter((finding) => finding.outcome === 'undetermined' && finding.severity === 'stop' && point !== undefined && (finding.fromVolts === null || finding.fromVolts <= point.volts));
 
   return (
