@@ -3,7 +3,7 @@ import { Drawing, steps } from './support/drawing';
 import { expect, expectNoAxeViolations, test } from './support/test';
 
 test('a sheet is drawn by keys and mouse, seen by another as it grows, and survives a reload', async ({ signedIn, baseURL }) => {
-  test.setTimeout(180_000);
+  test.setTimeout(300_000);
   const { page, context } = await signedIn('maker');
   const me = await (await context.request.get('/api/session')).json() as { readonly benches: readonly { readonly slug: string }[] };
   const made = await context.request.post(`/api/benches/${me.benches[0]?.slug}/circuits`, {

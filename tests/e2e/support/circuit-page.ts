@@ -37,11 +37,11 @@ export class CircuitPage {
 
   async checked(): Promise<void> {
     // On a phone the margin is another pane.
-    await expect(this.page.getByText(/\d+ checks on [^,]+, \d/).first()).toBeAttached({ timeout: 45_000 });
+    await expect(this.page.getByText(/\d+ checks on [^,]+, \d/).first()).toBeAttached({ timeout: 90_000 });
   }
 
   async saved(): Promise<void> {
-    await expect(this.page.getByRole('contentinfo').getByText(/^Saved/)).toBeVisible({ timeout: 15_000 });
+    await expect(this.page.getByRole('contentinfo').getByText(/^Saved/)).toBeVisible({ timeout: 30_000 });
   }
 
   async showAt(volts: string, key: 'Home' | 'End'): Promise<void> {
